@@ -1,0 +1,2 @@
+/** One class per arrangement: declares, gives an evaluator, assesses. */
+package slantfall.arrangement;

@@ -1,0 +1,2 @@
+/** The explicit list of arrangements: no reflection, no scanning. */
+package slantfall.catalogue;

@@ -1,0 +1,2 @@
+/** Rectangular ducts: what side walls do to a slot. */
+package slantfall.flow.duct;

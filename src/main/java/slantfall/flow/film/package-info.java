@@ -1,0 +1,2 @@
+/** Films under air on an incline. */
+package slantfall.flow.film;

@@ -1,0 +1,2 @@
+/** Flow between two walls. */
+package slantfall.flow.slot;
