@@ -16,12 +16,12 @@ public final class Prover {
         List<String> unknown = new ArrayList<>();
         for (PublishedRow row : rows) {
             Optional<Family> family = Families.of(row.id());
-            if (!row.problem().isEmpty()) {
-                results.add(broken(row, row.problem()));
-            } else if (family.isEmpty()) {
+            if (family.isEmpty() && !row.id().isEmpty()) {
                 unknown.add(row.id());
+            } else if (!row.problem().isEmpty()) {
+                results.add(broken(row, row.problem()));
             } else {
-                results.addAll(recompute(row, family.get()));
+                results.addAll(recompute(row, family.orElseThrow()));
             }
         }
         return new ProofResult(results, unknown);
