@@ -30,6 +30,8 @@ public final class Display {
         put(Kind.VOLUME_FLOW_PER_WIDTH, "m2/s|cm2/s|mm2/s", "L/(h cm)|L/(h m)", "gal/(min ft)|gal/(h ft)");
         put(Kind.PRESSURE_DIFFERENCE, "MPa|kPa|Pa", "bar|mbar|Pa", "psi|in of water");
         put(Kind.PRESSURE_ABSOLUTE, "MPa(a)|kPa(a)|Pa", "bar(a)|mbar(a)|Pa", "psi(a)");
+        put(Kind.ACCELERATION, "m/s2", "m/s2", "ft/s2");
+        put(Kind.PRESSURE_GRADIENT, "kPa/m|Pa/m", "bar/m|kPa/m|Pa/m", "psi/ft");
         put(Kind.HEAD, "m|mm", "m|mm", "ft|in");
         put(Kind.STRESS, "kPa|Pa|mPa", "kPa|Pa|mPa", "psi|lbf/ft2");
         put(Kind.SHEAR_RATE, "1/s", "1/s", "1/s");

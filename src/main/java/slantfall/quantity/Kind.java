@@ -17,6 +17,7 @@ public enum Kind {
     TIME("time", BasicUnits::time),
     FREQUENCY("frequency", BasicUnits::frequency),
     VELOCITY("velocity", BasicUnits::velocity),
+    ACCELERATION("acceleration", BasicUnits::acceleration),
     /** Spatial growth rate of a wave; positive grows. */
     GROWTH_RATE("growth rate along the flow", BasicUnits::growthRate),
     MASS_FLOW("mass flow in total", FlowUnits::mass),
@@ -25,6 +26,8 @@ public enum Kind {
     VOLUME_FLOW_PER_WIDTH("volume flow per width", FlowUnits::volumePerWidth),
     PRESSURE_DIFFERENCE("pressure difference", MechanicalUnits::pressureDifference),
     PRESSURE_ABSOLUTE("absolute pressure", MechanicalUnits::pressureAbsolute),
+    /** Pressure or body force over length. */
+    PRESSURE_GRADIENT("pressure gradient", MechanicalUnits::pressureGradient),
     /** Length of a column of the product itself. */
     HEAD("head of product", MechanicalUnits::head),
     STRESS("stress", MechanicalUnits::stress),

@@ -68,6 +68,11 @@ final class MechanicalUnits {
         return Unit.of(symbol, scale, symbol.endsWith("m") ? SI : NIST, symbol + " of product").noted("of product");
     }
 
+    static List<Unit> pressureGradient() {
+        return List.of(Unit.of("Pa/m", 1, SI, "N/m3"), Unit.of("kPa/m", 1e3, SI), Unit.of("bar/m", 1e5, SI),
+                Unit.of("psi/ft", POUND_FORCE / (INCH * INCH) / FOOT, NIST));
+    }
+
     static List<Unit> stress() {
         return List.of(Unit.of("Pa", 1, SI, "N/m2"), Unit.of("mPa", 1e-3, SI), Unit.of("kPa", 1e3, SI),
                 Unit.of("dyn/cm2", 0.1, NIST), Unit.of("psi", POUND_FORCE / (INCH * INCH), NIST, "lbf/in2"),
