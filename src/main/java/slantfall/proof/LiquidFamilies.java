@@ -2,6 +2,8 @@ package slantfall.proof;
 
 import java.util.List;
 import slantfall.liquid.Correlations;
+import slantfall.liquid.HandbookWater;
+import slantfall.liquid.WaterViscosity2008;
 
 /** Section 10: the correlations of the liquids, the very ones that presets name. */
 final class LiquidFamilies {
@@ -12,6 +14,10 @@ final class LiquidFamilies {
     static final List<Family> ALL = List.of(
             Family.list("10.SR6-08", "density, viscosity, conductivity, heat capacity of water", LiquidFamilies::water),
             Family.one("10.SR6.mu", "viscosity of water", in -> pure("iapws-sr6-08-viscosity", in)),
+            Family.one("10.R12-08", "viscosity of water at a given density",
+                    in -> WaterViscosity2008.at(in.temperature(), in.positive("rho"))),
+            Family.list("10.VFT.water", "viscosity of water by a handbook fit",
+                    in -> java.util.Arrays.stream(in.list("T")).map(HandbookWater::viscosity).toArray()),
             Family.one("10.R1-76", "surface tension of water", in -> pure("iapws-r1-76-surface-tension", in)),
             Family.one("10.gly.SO", "viscosity of glycerol and water", in -> mixed("cheng-2008-viscosity", in)),
             Family.list("10.gly.Cheng", "viscosity and density of glycerol and water", in -> new double[] {
