@@ -23,7 +23,19 @@ class VerificationPageTest {
         if (Boolean.getBoolean("verification.write")) {
             Files.writeString(PAGE, page);
         }
-        assertThat(Files.readString(PAGE)).as(HOW).isEqualTo(page);
+        String committed = Files.readString(PAGE);
+        assertThat(committed.equals(page)).as(HOW + firstDifference(committed, page)).isTrue();
+    }
+
+    private static String firstDifference(String committed, String page) {
+        List<String> was = committed.lines().toList();
+        List<String> is = page.lines().toList();
+        for (int i = 0; i < Math.min(was.size(), is.size()); i++) {
+            if (!was.get(i).equals(is.get(i))) {
+                return "\nline " + (i + 1) + " was: " + was.get(i) + "\nis now: " + is.get(i);
+            }
+        }
+        return "\nlines: " + was.size() + " committed, " + is.size() + " now";
     }
 
     @Test
