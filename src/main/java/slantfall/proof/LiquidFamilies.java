@@ -3,6 +3,8 @@ package slantfall.proof;
 import java.util.List;
 import slantfall.liquid.Correlations;
 import slantfall.liquid.HandbookWater;
+import slantfall.liquid.If97Region1;
+import slantfall.liquid.MaoDuan;
 import slantfall.liquid.WaterViscosity2008;
 
 /** Section 10: the correlations of the liquids, the very ones that presets name. */
@@ -18,6 +20,11 @@ final class LiquidFamilies {
                     in -> WaterViscosity2008.at(in.temperature(), in.positive("rho"))),
             Family.list("10.VFT.water", "viscosity of water by a handbook fit",
                     in -> java.util.Arrays.stream(in.list("T")).map(HandbookWater::viscosity).toArray()),
+            Family.list("10.IF97.R1", "specific volume of water under pressure", in -> new double[] {
+                If97Region1.specificVolume(300, 3e6), If97Region1.specificVolume(300, 80e6),
+                If97Region1.specificVolume(500, 3e6)
+            }),
+            Family.list("10.NaCl.MaoDuan", "viscosity of sodium chloride brine", LiquidFamilies::maoDuan),
             Family.one("10.R1-76", "surface tension of water", in -> pure("iapws-r1-76-surface-tension", in)),
             Family.one("10.gly.SO", "viscosity of glycerol and water", in -> mixed("cheng-2008-viscosity", in)),
             Family.list("10.gly.Cheng", "viscosity and density of glycerol and water", in -> new double[] {
@@ -42,6 +49,11 @@ final class LiquidFamilies {
             pure("iapws-sr6-08-density", in), pure("iapws-sr6-08-viscosity", in),
             pure("iapws-sr6-08-conductivity", in), pure("iapws-sr6-08-heat-capacity", in)
         };
+    }
+
+    private static double[] maoDuan(Inputs in) {
+        double relative = MaoDuan.relative(in.temperature(), in.positive("molality"));
+        return new double[] {relative, relative * pure("iapws-sr6-08-viscosity", in)};
     }
 
     private static double pure(String key, Inputs in) {
