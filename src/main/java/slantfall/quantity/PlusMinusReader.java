@@ -8,11 +8,11 @@ final class PlusMinusReader {
 
     private static final Pattern SIGN = Pattern.compile("^(?:±|\\+ ?/ ?-|\\+-|plus ?(?:or)? ?-?minus) ?",
             Pattern.CASE_INSENSITIVE);
-    private static final Pattern RELATIVE = Pattern.compile("(?:%|per ?cent|percent) ?(?:of (?:the )?value|relative|rel\\.?)",
-            Pattern.CASE_INSENSITIVE);
+    private static final Pattern RELATIVE = Pattern.compile(
+            "(?:%|per ?cent) ?(?:of (?:the )?value|relative|rel\\.?)", Pattern.CASE_INSENSITIVE);
     private static final Pattern POINTS = Pattern.compile("(?:%|percentage)? ?(?:points?|absolute|abs\\.?)",
             Pattern.CASE_INSENSITIVE);
-    private static final Pattern PER_CENT = Pattern.compile("%|per ?cent|percent", Pattern.CASE_INSENSITIVE);
+    private static final Pattern PER_CENT = Pattern.compile("%|per ?cent", Pattern.CASE_INSENSITIVE);
 
     private PlusMinusReader() {
     }

@@ -8,7 +8,7 @@ import java.util.regex.Pattern;
 final class TubeReader {
 
     private static final Pattern GAUGE = Pattern.compile(
-            "(.*?) ?(?:od|o\\.d\\.)? ?[x*,] ?([0-9]{1,2}) ?(?:bwg|ga\\.? bwg)", Pattern.CASE_INSENSITIVE);
+            "(.*?) ?(?:od|o\\.d\\.)?[ x*,]+([0-9]{1,2}) ?(?:bwg|ga\\.? bwg)", Pattern.CASE_INSENSITIVE);
     private static final Pattern INSIDE = Pattern.compile(
             "(.*?[^ ]) ?(?:\\b|(?<=[\"']))(?:id|i\\.d\\.|inside(?: diameter)?)", Pattern.CASE_INSENSITIVE);
     private static final Pattern OUTSIDE = Pattern.compile(
