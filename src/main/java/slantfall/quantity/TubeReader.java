@@ -38,7 +38,8 @@ final class TubeReader {
         return FRACTION.matcher(typed.clean()).matches() ? Optional.of(plain(typed)) : Optional.empty();
     }
 
-    private static Entry plain(Typed typed) {
+    /** A length without the words of tubes; fractions of an inch are read. */
+    static Entry plain(Typed typed) {
         Matcher m = FRACTION.matcher(typed.clean());
         if (!m.matches()) {
             return LinearReader.read(typed);

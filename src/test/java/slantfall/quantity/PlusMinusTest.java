@@ -26,7 +26,8 @@ class PlusMinusTest {
         "ANGLE | 5 % of value | 0.2 | 0.01", "CONTACT_ANGLE | ± 15° | 1.0 | 0.261799387799149",
         "FRACTION | 5 % of value | 0.8 | 0.04", "FRACTION | 5 points | 0.8 | 0.05",
         "FRACTION | 5 % points | 0.8 | 0.05", "FRACTION | 0.5 Bx | 0.45 | 0.005", "FRACTION | 0.05 | 0.8 | 0.05",
-        "COUNT | 4 | 125 | 4", "MASS_FLOW_PER_WIDTH | ± 0 % | 0.3 | 0", "DENSITY | 0.5 % | 1040 | 5.2"})
+        "LENGTH | 1/32 in | 0.045 | 0.00079375", "DENSITY | 0.01 SG | 1040 | 9.9997495",
+        "FRACTION | 0.5 % TS | 0.12 | 0.005", "COUNT | 4 | 125 | 4", "MASS_FLOW_PER_WIDTH | ± 0 % | 0.3 | 0", "DENSITY | 0.5 % | 1040 | 5.2"})
     void readsTheHalfWidth(Kind kind, String text, double centre, double half) {
         assertThat(EntryReader.plusMinus(text, kind, centre, CONTEXT)).isCloseTo(half, within(half * 1e-10));
         assertThat(EntryReader.plusMinusEntry(text, kind, centre, CONTEXT).echo()).startsWith("± ");
@@ -37,6 +38,7 @@ class PlusMinusTest {
         "FRACTION | 5 % | 0.8 | 5 points", "RATIO | 5 % | 0.8 | 5 % of value", "ANGLE | 5 % | 0.2 | of value",
         "TEMPERATURE | 5 % | 333 | zero is arbitrary", "LENGTH | -5 mm | 0.1 | negative", "LENGTH | 5 | 0.1 | no unit",
         "LENGTH | 5 kg | 0.1 | is a mass", "LENGTH | 20 % | 0 | zero or unknown", "LENGTH | ± | 0.1 | number",
+        "DENSITY | 0.5 °Bé | 1040 | not known", "LENGTH | 1.5 in x 16 BWG | 0.04 | number",
         "LENGTH | 20 % | NaN | zero or unknown", "ANGLE | 1:12 | 0.2 | not known", "LENGTH | 1,234 mm | 3 | 1234"})
     void refusesWhatIsNoClearHalfWidth(Kind kind, String text, double centre, String words) {
         assertThatExceptionOfType(QuantityProblem.class)
