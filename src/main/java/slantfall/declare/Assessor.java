@@ -115,7 +115,7 @@ public final class Assessor {
                 readings,
                 all,
                 panels(all),
-                LiquidReport.of(liquid, state),
+                LiquidReport.of(liquid, setUp.liquidState()),
                 profiles,
                 workings,
                 cautions,

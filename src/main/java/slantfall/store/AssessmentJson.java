@@ -66,7 +66,7 @@ public final class AssessmentJson {
                     .put("panel", check.info().panel())
                     .put("question", question(assessment, check))
                     .put("name", check.info().name())
-                    .put("kind", check.info().kind().key())
+                    .put("kind", kind(check.info().kind()))
                     .put("unit", check.info().kind().si().symbol())
                     .put("verdict", check.verdict().word())
                     .put("side", check.info().side().words())
@@ -79,6 +79,11 @@ public final class AssessmentJson {
                     .put("note", check.note()));
         }
         return list;
+    }
+
+    /** A Reynolds number says its definition, any other kind its key. */
+    private static String kind(Kind kind) {
+        return kind.key().startsWith("reynolds") ? kind.words() : kind.key();
     }
 
     private static String question(Assessment assessment, CheckResult check) {
