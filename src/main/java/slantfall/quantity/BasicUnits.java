@@ -100,6 +100,10 @@ final class BasicUnits {
                 Unit.of("in/min", INCH / MINUTE, NIST));
     }
 
+    static List<Unit> acceleration() {
+        return List.of(Unit.of("m/s2", 1, SI), Unit.of("ft/s2", FOOT, NIST));
+    }
+
     static List<Unit> temperature() {
         return List.of(Unit.of("K", 1, SI), Unit.of("degC", 1, SI).from(273.15),
                 Unit.of("degF", FAHRENHEIT, NIST).from(459.67 * 5 / 9));
