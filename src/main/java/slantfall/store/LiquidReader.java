@@ -1,8 +1,6 @@
 package slantfall.store;
 
-import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import slantfall.declare.Arrangement;
 import slantfall.declare.Declaration;
 import slantfall.declare.Entries;
@@ -12,17 +10,13 @@ import slantfall.declare.SetUp;
 import slantfall.declare.Setting;
 import slantfall.declare.Value;
 import slantfall.liquid.Preset;
-import slantfall.liquid.ViscosityFit;
 import slantfall.quantity.EntryContext;
-import slantfall.quantity.Kind;
 
 /** Reads the liquid of a set-up: temperature and strength first, then the density, then what may lean on it. */
 final class LiquidReader {
 
     /** Keys that need nothing else, in the order they are read. */
     static final List<String> FIRST = List.of("temperature", "strength", "density");
-
-    private static final String POINTS = "Write two to ten pairs [[\"20 degC\", \"7.5 Pa s\"], …]";
 
     private final Presets presets;
     private final Arrangement arrangement;
@@ -87,41 +81,12 @@ final class LiquidReader {
         Node law = fields.take("viscosityFit");
         if (list == null) {
             if (law != null) {
-                throw law.problem("a fit needs \"viscosityPoints\"", POINTS);
+                throw law.problem("a fit needs \"viscosityPoints\"", "Add the points, or leave the fit out");
             }
             return setUp;
         }
-        List<ViscosityFit.Point> points = new ArrayList<>();
-        List<List<String>> typed = new ArrayList<>();
-        for (Node pair : Fields.list(list, POINTS)) {
-            List<Node> parts = Fields.list(pair, POINTS);
-            if (parts.size() != 2) {
-                throw pair.problem("a point is a temperature and a viscosity", POINTS);
-            }
-            Node temperature = parts.get(0);
-            Node viscosity = parts.get(1);
-            double t = ValueReader.entryOf(temperature, Kind.TEMPERATURE, EntryContext.none()).si();
-            double mu = ValueReader.entryOf(viscosity, Kind.VISCOSITY, at(setUp, t)).si();
-            points.add(new ViscosityFit.Point(t, mu));
-            typed.add(List.of(
-                    ValueReader.text(temperature, Kind.TEMPERATURE), ValueReader.text(viscosity, Kind.VISCOSITY)));
-        }
-        String word = law == null ? "" : Fields.text(law);
-        ViscosityFit fit = fit(points, word, law == null ? list : law, list);
-        return setUp.withBase(new LiquidBase(setUp.base().preset(), fit, typed, word));
-    }
-
-    private static ViscosityFit fit(List<ViscosityFit.Point> points, String word, Node law, Node list) {
-        Map<String, ViscosityFit.Law> laws = Fits.laws();
-        if (!word.isEmpty() && !laws.containsKey(word)) {
-            throw law.problem("there is no fit \"" + Place.shortened(word) + "\"",
-                    "Write one of " + String.join(", ", laws.keySet()) + ", or leave it out");
-        }
-        try {
-            return Fits.of(points, word);
-        } catch (IllegalArgumentException e) {
-            throw new StoreProblem(list.place(), e.getMessage(), POINTS, e);
-        }
+        Points points = Points.read(list, law, t -> at(setUp, t));
+        return setUp.withBase(new LiquidBase(setUp.base().preset(), points.fit(), points.typed(), points.law()));
     }
 
     /** What a viscosity at some temperature may lean on: the density there. */
@@ -144,7 +109,7 @@ final class LiquidReader {
 
     private void noticeIdleStrength(SetUp setUp, Fields fields) {
         Node node = fields.take("strength");
-        boolean solution = setUp.base().preset() != null && setUp.base().preset().solution();
+        boolean solution = setUp.base().preset() != null && !setUp.base().preset().solute().isEmpty();
         if (node != null && !solution) {
             kept.report("liquid.strength has no effect: the liquid is no preset of a solution");
         }

@@ -15,7 +15,6 @@ import slantfall.declare.Requirement;
 import slantfall.declare.SetUp;
 import slantfall.declare.Setting;
 import slantfall.declare.Value;
-import slantfall.liquid.ViscosityFit;
 import slantfall.quantity.EntryContext;
 import slantfall.quantity.EntryReader;
 import slantfall.quantity.Kind;
@@ -66,7 +65,7 @@ final class SetUpWriter {
             }
         }
         if (base.points() != null) {
-            node.put("viscosityPoints", points(base));
+            node.put("viscosityPoints", Points.node(base.points(), base.typedPoints(), this::at));
             if (!base.fitKind().isEmpty()) {
                 node.put("viscosityFit", base.fitKind());
             }
@@ -74,19 +73,8 @@ final class SetUpWriter {
         return node;
     }
 
-    private Node points(LiquidBase base) {
-        Node list = Node.list();
-        List<ViscosityFit.Point> points = base.points().points();
-        for (int i = 0; i < points.size(); i++) {
-            ViscosityFit.Point point = points.get(i);
-            List<String> typed = i < base.typedPoints().size() ? base.typedPoints().get(i) : List.of("", "");
-            EntryContext there = Entries.context(
-                    setUp.with(Declaration.LIQUID + "temperature", Value.of(point.temperature())), declaration);
-            list.add(Node.list()
-                    .add(ValueWriter.quantity(point.temperature(), typed.get(0), Kind.TEMPERATURE, EntryContext.none()))
-                    .add(ValueWriter.quantity(point.viscosity(), typed.get(1), Kind.VISCOSITY, there)));
-        }
-        return list;
+    private EntryContext at(double temperature) {
+        return Entries.context(setUp.with(Declaration.LIQUID + "temperature", Value.of(temperature)), declaration);
     }
 
     private Node settings() {
