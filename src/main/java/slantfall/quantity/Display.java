@@ -29,7 +29,6 @@ public final class Display {
         put(Kind.TIME, "s|ms", "h|min|s|ms", "h|min|s|ms");
         put(Kind.FREQUENCY, "Hz", "Hz", "Hz");
         put(Kind.VELOCITY, "m/s|mm/s", "m/s|mm/s", "ft/s|in/s");
-        put(Kind.ACCELERATION, "m/s2", "m/s2", "ft/s2");
         put(Kind.GROWTH_RATE, "1/m", "1/m", "1/ft");
         put(Kind.MASS_FLOW, "kg/s|g/s", "t/h|kg/h", "lb/h");
         put(Kind.VOLUME_FLOW, "m3/s|L/s|cm3/s", "m3/h|L/h|cm3/min", "gal/min|gal/h");
