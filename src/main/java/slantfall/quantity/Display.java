@@ -75,7 +75,10 @@ public final class Display {
      */
     public static Unit unit(Kind kind, UnitSystem system, double si) {
         List<Unit> ladder = ladder(kind, system);
-        if (si == 0 || Double.isNaN(si)) {
+        if (si == 0) {
+            return ladder.stream().filter(u -> u.scale() == 1 && u.offset() == 0).findFirst().orElse(ladder.get(ladder.size() - 1));
+        }
+        if (Double.isNaN(si)) {
             return ladder.get(0);
         }
         double from = system != UnitSystem.US && IN_TENTHS.contains(kind) ? 0.1 : 1;
