@@ -60,7 +60,8 @@ final class LiquidReader {
         List<String> known = presets.all().stream().map(Preset::key).toList();
         return presets.find(key).orElseThrow(() -> node.problem(
                 "there is no liquid \"" + Place.shortened(key) + "\" among the presets",
-                "Write one of " + String.join(", ", known) + ", or give measured values"));
+                "Write one of " + String.join(", ", known) + ", or give measured values"
+                        + (presets.problems().isEmpty() ? "" : ". A liquid of your own is broken: " + presets.problems().get(0))));
     }
 
     private SetUp property(SetUp setUp, Fields fields, Setting setting, EntryContext context) {

@@ -43,11 +43,17 @@ final class NodeReader {
             throw new StoreProblem(Place.of(file), "the file is empty", "Open its backup " + file + "~ or start anew");
         }
         try (JsonParser parser = FACTORY.createParser(text)) {
-            return new NodeReader(file, parser).whole();
-        } catch (JsonProcessingException e) {
-            throw problem(file, e);
+            return read(new NodeReader(file, parser));
         } catch (IOException e) {
             throw new StoreProblem(Place.of(file), "could not be read: " + e.getMessage(), "Try again", e);
+        }
+    }
+
+    private static Node read(NodeReader reader) throws IOException {
+        try {
+            return reader.whole();
+        } catch (JsonProcessingException e) {
+            throw reader.problem(e);
         }
     }
 
@@ -101,9 +107,9 @@ final class NodeReader {
         return new Place(file, at.getLineNr(), at.getColumnNr(), pointer);
     }
 
-    private static StoreProblem problem(String file, JsonProcessingException e) {
-        JsonLocation at = e.getLocation();
-        Place place = at == null ? Place.of(file) : new Place(file, at.getLineNr(), at.getColumnNr(), "");
+    private StoreProblem problem(JsonProcessingException e) {
+        JsonLocation at = e.getLocation() == null ? parser.currentLocation() : e.getLocation();
+        Place place = new Place(file, at.getLineNr(), at.getColumnNr(), "");
         if (e instanceof JsonEOFException) {
             return new StoreProblem(place, "the file ends in the middle: it was cut off",
                     "Open its backup " + Place.shortened(file) + "~ or complete it", e);
@@ -115,10 +121,19 @@ final class NodeReader {
                             "A set-up needs five; check what wrote this file", e)
                     : new StoreProblem(place, "a number has more than " + LONGEST_NUMBER + " digits", "Shorten it", e);
         }
-        String said = Place.shortened(e.getOriginalMessage().lines().findFirst().orElse("").replaceAll(" \\(code \\d+\\)", ""));
-        String remedy = said.contains("NaN") || said.contains("INF") || said.contains("Infinity")
-                ? "JSON has no NaN or Infinity: leave the value out where it is unknown"
-                : "Look for a missing comma, quote or bracket just before";
-        return new StoreProblem(place, "is no valid JSON: " + said, remedy, e);
+        return malformed(place, e);
+    }
+
+    private static StoreProblem malformed(Place place, JsonProcessingException e) {
+        String said = e.getOriginalMessage().lines().findFirst().orElse("");
+        if (said.contains("NON_NUMERIC")) {
+            return new StoreProblem(place, "JSON has no NaN or Infinity", "Leave the value out where it is unknown", e);
+        }
+        if (said.contains("unquoted character")) {
+            return new StoreProblem(place, "a line break or control character stands inside a text",
+                    "Close the quote before it, or write it as \\n", e);
+        }
+        return new StoreProblem(place, "is no valid JSON: " + Place.shortened(said.replaceAll(" \\(code \\d+\\)", "")),
+                "Look for a missing comma, quote or bracket just before", e);
     }
 }
