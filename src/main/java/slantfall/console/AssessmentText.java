@@ -1,0 +1,173 @@
+package slantfall.console;
+
+import java.io.PrintWriter;
+import java.util.List;
+import java.util.Set;
+import slantfall.declare.Assessment;
+import slantfall.declare.CheckResult;
+import slantfall.declare.Headline;
+import slantfall.declare.LiquidReport;
+import slantfall.declare.LiquidSettings;
+import slantfall.declare.MarginWords;
+import slantfall.declare.Notice;
+import slantfall.declare.PanelResult;
+import slantfall.declare.Profile;
+import slantfall.declare.Setting;
+import slantfall.declare.Working;
+import slantfall.quantity.Kind;
+import slantfall.quantity.Show;
+import slantfall.quantity.UnitSystem;
+
+/** An assessment as text for people. */
+final class AssessmentText {
+
+    private static final int DIGITS = 3;
+
+    private final PrintWriter out;
+    private final UnitSystem units;
+
+    AssessmentText(PrintWriter out, UnitSystem units) {
+        this.out = out;
+        this.units = units;
+    }
+
+    void print(Assessment a, List<String> reports, Set<String> parts) {
+        String title = a.setUp().title().isEmpty() ? "Untitled" : a.setUp().title();
+        out.println(title + " — " + a.declaration().name());
+        Headline headline = Headline.of(a);
+        out.println(headline.verdict().shape() + " " + headline.sentence());
+        settings(a);
+        liquid(a);
+        readings(a);
+        ownRules(a);
+        panels(a);
+        profile(parts.contains("traverses"), "Traverses", a.profiles().traverses());
+        profile(parts.contains("courses"), "Courses", a.profiles().courses());
+        if (parts.contains("working")) {
+            workings(a);
+        }
+        notices(a, reports);
+    }
+
+    private String show(double value, Kind kind) {
+        return Double.isNaN(value) ? "unknown" : Show.value(value, kind, units, DIGITS);
+    }
+
+    private void heading(String text) {
+        out.println();
+        out.println(text);
+    }
+
+    private void settings(Assessment a) {
+        heading("Settings");
+        Table table = new Table();
+        for (Setting s : a.declaration().coordinates()) {
+            double value = a.setUp().value(s);
+            String typed = a.setUp().values().containsKey(s.key()) ? a.setUp().values().get(s.key()).typed() : null;
+            String origin = typed == null ? "untouched default" : typed.isEmpty() ? "" : "from " + typed;
+            table.row(s.name(), s.symbol(), show(value, s.kind()), origin);
+        }
+        a.declaration().choices().forEach(c -> {
+            String key = a.setUp().structure().choice(c);
+            String name = c.options().stream().filter(o -> o.key().equals(key)).findFirst().orElseThrow().name();
+            table.row(c.name(), "", name, a.setUp().choices().containsKey(c.key()) ? "" : "untouched default");
+        });
+        table.print(out, "  ");
+    }
+
+    private void liquid(Assessment a) {
+        heading("Liquid: " + a.liquid().name());
+        Table table = new Table();
+        for (LiquidReport.Row row : a.liquid().properties()) {
+            Setting setting = LiquidSettings.of(row.property().key());
+            table.row(setting.name(), setting.symbol(), show(row.value(), setting.kind()), row.origin());
+        }
+        table.print(out, "  ");
+    }
+
+    private void readings(Assessment a) {
+        heading("Readings");
+        Table table = new Table();
+        a.readings().forEach(r ->
+                table.row(r.reading().name(), r.reading().symbol(), show(r.value(), r.reading().kind())));
+        table.print(out, "  ");
+    }
+
+    private void ownRules(Assessment a) {
+        Table table = new Table();
+        a.checks().stream().filter(CheckResult::binding).forEach(c -> row(table, c));
+        if (!table.isEmpty()) {
+            heading("Your rules");
+            table.print(out, "  ");
+        }
+    }
+
+    private void panels(Assessment a) {
+        heading("Panels of rules");
+        for (PanelResult panel : a.panels()) {
+            out.println("  " + panel.panel().question() + " — " + panel.phrase());
+            Table table = new Table();
+            panel.results().forEach(c -> row(table, c));
+            table.print(out, "    ");
+        }
+    }
+
+    private void row(Table table, CheckResult c) {
+        table.row(
+                c.verdict().shape() + " " + c.verdict().word() + (c.inRange() ? "" : ", out of range"),
+                c.info().name(),
+                show(c.value(), c.info().kind()) + " " + c.info().side().words() + " " + show(c.limit(), c.info().kind()),
+                MarginWords.of(c),
+                c.info().source().text());
+    }
+
+    private void profile(boolean wanted, String name, Profile profile) {
+        if (!wanted || profile.columns().isEmpty()) {
+            return;
+        }
+        heading(name + (Double.isNaN(profile.place()) ? "" : ", " + show(profile.place(), Kind.LENGTH) + " from the inlet"));
+        Table table = new Table();
+        String[] head = new String[profile.columns().size() + 1];
+        head[0] = profile.axis().name();
+        for (int j = 0; j < profile.columns().size(); j++) {
+            head[j + 1] = profile.columns().get(j).name();
+        }
+        table.row(head);
+        for (int i = 0; i < profile.axis().values().length; i++) {
+            String[] cells = new String[head.length];
+            cells[0] = show(profile.axis().values()[i], profile.axis().kind());
+            for (int j = 0; j < profile.columns().size(); j++) {
+                Profile.Column column = profile.columns().get(j);
+                cells[j + 1] = show(column.values()[i], column.kind());
+            }
+            table.row(cells);
+        }
+        table.print(out, "  ");
+    }
+
+    private void workings(Assessment a) {
+        heading("Working");
+        for (Working working : a.workings()) {
+            out.println("  " + working.about());
+            for (Working.Step step : working.steps()) {
+                out.println("    " + step.symbol() + " = " + step.formula() + " = "
+                        + Show.value(step.result(), step.kind(), UnitSystem.SI, 6));
+                StringBuilder terms = new StringBuilder("      with ");
+                for (Working.Term term : step.terms()) {
+                    terms.append(term.symbol()).append(" = ")
+                            .append(Show.value(term.value(), term.kind(), UnitSystem.SI, 6)).append("; ");
+                }
+                out.println(terms.append(step.source().text()).append("; holds for: ").append(step.range()));
+            }
+        }
+    }
+
+    private void notices(Assessment a, List<String> reports) {
+        heading("Notes");
+        reports.forEach(r -> out.println("  - " + r));
+        for (Notice notice : a.notices()) {
+            out.println("  - " + notice.text());
+        }
+        a.cautions().forEach(c -> out.println("  ! " + c));
+    }
+}

@@ -1,0 +1,8 @@
+package slantfall.console;
+
+/** How results are written. */
+enum Form {
+    TEXT,
+    JSON,
+    CSV
+}
