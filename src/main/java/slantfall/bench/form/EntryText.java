@@ -11,6 +11,7 @@ import slantfall.declare.Value;
 import slantfall.quantity.Entry;
 import slantfall.quantity.EntryContext;
 import slantfall.quantity.EntryReader;
+import slantfall.quantity.Kind;
 import slantfall.quantity.QuantityProblem;
 import slantfall.quantity.Show;
 import slantfall.quantity.Unit;
@@ -64,20 +65,18 @@ final class EntryText {
     }
 
     private Entry entry(String text) {
-        return EntryReader.read(withUnit(text), setting.kind(), context);
+        return EntryReader.read(withUnit(text, setting.kind(), unit), setting.kind(), context);
     }
 
     /** A bare number takes the unit shown beside the field. */
-    private String withUnit(String text) {
-        boolean bare = BARE.matcher(text).matches() && !setting.kind().dimensionless();
+    static String withUnit(String text, Kind kind, Unit unit) {
+        boolean bare = BARE.matcher(text).matches() && !kind.dimensionless();
         return bare ? text + " " + unit.symbol() : text;
     }
 
     private Read plusMinus(String centre, String half) {
         Entry entry = entry(centre);
-        String typedHalf = BARE.matcher(half).matches() && !setting.kind().dimensionless()
-                ? half + " " + entry.unit().symbol()
-                : half;
+        String typedHalf = withUnit(half, setting.kind(), entry.unit());
         double width = EntryReader.plusMinus(typedHalf, setting.kind(), entry.si(), context);
         Tolerance tolerance = new Tolerance(
                 Tolerance.Shape.UNIFORM, entry.si() - width, entry.si() + width, List.of(typedHalf));
@@ -92,10 +91,7 @@ final class EntryText {
 
     private Read range(String low, String high) {
         Entry to = entry(high);
-        String lowText = BARE.matcher(low).matches() && !setting.kind().dimensionless()
-                ? low + " " + to.unit().symbol()
-                : low;
-        Entry from = EntryReader.read(lowText, setting.kind(), context);
+        Entry from = EntryReader.read(withUnit(low, setting.kind(), to.unit()), setting.kind(), context);
         if (from.si() > to.si()) {
             throw new QuantityProblem("the range runs from " + low + " down to " + high, List.of(),
                     "give the smaller end first");

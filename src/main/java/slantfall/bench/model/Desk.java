@@ -15,6 +15,7 @@ import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import slantfall.declare.Assessment;
 import slantfall.declare.Declaration;
+import slantfall.declare.Entries;
 import slantfall.declare.LiquidReport;
 import slantfall.declare.SetUp;
 import slantfall.declare.Setting;
@@ -164,9 +165,7 @@ public final class Desk {
 
     /** What the surroundings tell the reading of an entry. */
     public EntryContext context() {
-        Assessment now = assessment;
-        double width = now.declaration().setting("width").map(now.setUp()::value).orElse(Double.NaN);
-        return new EntryContext(property(Property.DENSITY).map(LiquidReport.Row::value).orElse(Double.NaN), width);
+        return Entries.context(session.current(), session.declaration());
     }
 
     /** A property of the liquid with its origin, if it is known. */
