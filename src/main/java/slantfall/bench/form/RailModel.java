@@ -6,8 +6,10 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ReadOnlyIntegerProperty;
 import javafx.beans.property.ReadOnlyIntegerWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
 import slantfall.bench.model.Desk;
 import slantfall.declare.Assessment;
 import slantfall.declare.Declaration;
@@ -27,6 +29,7 @@ public final class RailModel {
     private final Desk desk;
     private final Map<String, FieldModel> fields = new LinkedHashMap<>();
     private final ReadOnlyIntegerWrapper edition = new ReadOnlyIntegerWrapper();
+    private final BooleanProperty starting = new SimpleBooleanProperty();
     private List<ChoiceModel> choices = List.of();
     private List<String> shape = List.of();
 
@@ -54,6 +57,16 @@ public final class RailModel {
         public String title() {
             return title;
         }
+    }
+
+    /** Whether a new set-up has just begun, so that only what it must have is asked for. */
+    public BooleanProperty startingProperty() {
+        return starting;
+    }
+
+    /** The few fields that a new set-up is asked for. */
+    public List<FieldModel> essentials() {
+        return desk.declaration().essentials().stream().flatMap(k -> field(k).stream()).toList();
     }
 
     /** Counts up whenever the fields themselves are others. */
@@ -118,6 +131,7 @@ public final class RailModel {
         fields.values().forEach(f -> f.refresh(assessment));
         choices = assessment.declaration().choices().stream().map(c -> new ChoiceModel(desk, c)).toList();
         shape = List.copyOf(keys);
+        starting.set(starting.get() && !other);
         edition.set(edition.get() + 1);
     }
 

@@ -6,6 +6,7 @@ import java.util.Map;
 import java.util.function.Supplier;
 import javafx.geometry.Insets;
 import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -44,11 +45,15 @@ public final class RailView extends ScrollPane {
         setContent(content);
         setAccessibleText("Settings");
         model.editionProperty().addListener((o, a, b) -> build());
+        model.startingProperty().addListener((o, a, b) -> build());
         build();
     }
 
     /** Puts the keyboard into the field of a setting; false if there is none. */
     public boolean focus(String key) {
+        if (!views.containsKey(key)) {
+            model.startingProperty().set(false);
+        }
         FieldView view = views.get(key);
         if (view == null) {
             return false;
@@ -67,7 +72,9 @@ public final class RailView extends ScrollPane {
 
     /** Puts the keyboard into the first field. */
     public void focusFirst() {
-        model.fields(RailModel.Group.GEOMETRY).stream().findFirst().ifPresent(f -> focus(f.setting().key()));
+        (model.startingProperty().get() ? model.essentials() : model.fields(RailModel.Group.GEOMETRY)).stream()
+                .findFirst()
+                .ifPresent(f -> focus(f.setting().key()));
     }
 
     private void show(Node node) {
@@ -78,6 +85,10 @@ public final class RailView extends ScrollPane {
 
     private void build() {
         views.clear();
+        if (model.startingProperty().get()) {
+            content.getChildren().setAll(group("To begin with", box(liquid, rows(model.essentials()), all())));
+            return;
+        }
         content.getChildren().setAll(
                 group("Liquid", box(liquid, rows(RailModel.Group.LIQUID), more(RailModel.Group.PROPERTIES))),
                 group("Geometry", rows(RailModel.Group.GEOMETRY)),
@@ -101,9 +112,21 @@ public final class RailView extends ScrollPane {
         return box;
     }
 
+    private Button all() {
+        Button all = new Button("All settings");
+        all.setId("all-settings");
+        all.setMaxWidth(Double.MAX_VALUE);
+        all.setOnAction(e -> model.startingProperty().set(false));
+        return all;
+    }
+
     private VBox rows(RailModel.Group group) {
+        return rows(model.fields(group));
+    }
+
+    private VBox rows(List<FieldModel> fields) {
         VBox box = new VBox(8);
-        for (FieldModel field : model.fields(group)) {
+        for (FieldModel field : fields) {
             FieldView view = new FieldView(field);
             views.put(field.setting().key(), view);
             box.getChildren().add(view);

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Supplier;
 import javafx.collections.ListChangeListener;
 import javafx.collections.ObservableList;
 import javafx.geometry.Insets;
@@ -134,7 +135,7 @@ public final class LedgerView extends ScrollPane {
     private void buildReadings() {
         List<Node> nodes = new ArrayList<>();
         for (ReadingRow row : model.readings()) {
-            Opening opening = new Opening(Rows.reading(row), () -> inside(row));
+            Opening opening = new Opening(Rows.reading(row), true, () -> inside(row));
             opening.setId("row-" + row.reading().key());
             rows.put(row.reading().key(), opening);
             nodes.add(opening);
@@ -153,7 +154,7 @@ public final class LedgerView extends ScrollPane {
         List<Node> nodes = new ArrayList<>();
         model.own().forEach(row -> nodes.add(check(row)));
         for (PanelRow row : model.panels()) {
-            Opening opening = known(row.panel().key(), row, () -> new Opening(Rows.panel(row), () -> authors(row)));
+            Opening opening = known(row.panel().key(), row, () -> new Opening(Rows.panel(row), false, () -> authors(row)));
             nodes.add(opening);
         }
         boolean brief = model.briefProperty().get();
@@ -161,7 +162,7 @@ public final class LedgerView extends ScrollPane {
         checks.getChildren().setAll(brief ? nodes.subList(0, Math.min(nodes.size(), Math.max(own, BRIEF))) : nodes);
     }
 
-    private Opening known(String key, Object row, java.util.function.Supplier<Opening> make) {
+    private Opening known(String key, Object row, Supplier<Opening> make) {
         Opening old = rows.get(key);
         if (old != null && old.getUserData() == row) {
             return old;
@@ -174,7 +175,7 @@ public final class LedgerView extends ScrollPane {
     }
 
     private Opening check(CheckRow row) {
-        return known(row.key(), row, () -> new Opening(Rows.check(row), () -> criterion(row)));
+        return known(row.key(), row, () -> new Opening(Rows.check(row), true, () -> criterion(row)));
     }
 
     private Node authors(PanelRow row) {

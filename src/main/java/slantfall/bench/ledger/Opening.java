@@ -13,10 +13,17 @@ final class Opening extends VBox {
 
     private final Region head;
     private final Supplier<Node> inside;
+    private final boolean numbers;
 
-    Opening(Region head, Supplier<Node> inside) {
+    /**
+     * A row.
+     *
+     * @param numbers whether the inside holds numbers that are written anew when they change
+     */
+    Opening(Region head, boolean numbers, Supplier<Node> inside) {
         super(4, head);
         this.head = head;
+        this.numbers = numbers;
         this.inside = inside;
         head.setFocusTraversable(true);
         head.setAccessibleRole(AccessibleRole.BUTTON);
@@ -55,7 +62,7 @@ final class Opening extends VBox {
 
     /** Makes the inside anew while it is open: its numbers have changed. */
     void renew() {
-        if (isOpen()) {
+        if (numbers && isOpen()) {
             getChildren().set(1, inside.get());
         }
     }
