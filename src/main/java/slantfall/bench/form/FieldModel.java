@@ -18,6 +18,7 @@ import slantfall.declare.Setting;
 import slantfall.declare.Tolerance;
 import slantfall.declare.Value;
 import slantfall.liquid.Property;
+import slantfall.liquid.Provision;
 import slantfall.quantity.QuantityProblem;
 import slantfall.quantity.Show;
 import slantfall.quantity.Unit;
@@ -37,6 +38,7 @@ public final class FieldModel {
     private final StringProperty echo = new SimpleStringProperty("");
     private final StringProperty problem = new SimpleStringProperty("");
     private final StringProperty badge = new SimpleStringProperty("");
+    private final StringProperty origin = new SimpleStringProperty("");
     private final StringProperty spoken = new SimpleStringProperty("");
     private final DoubleProperty position = new SimpleDoubleProperty();
     private final ObjectProperty<Standing> standing = new SimpleObjectProperty<>(Standing.DEFAULT);
@@ -87,6 +89,11 @@ public final class FieldModel {
         return badge;
     }
 
+    /** Where a property of the liquid comes from, empty for a setting. */
+    public StringProperty originProperty() {
+        return origin;
+    }
+
     /** The setting with its value and standing, for a screen reader. */
     public StringProperty spokenProperty() {
         return spoken;
@@ -126,7 +133,8 @@ public final class FieldModel {
                 : assessment.setUp().value(setting);
         unit.set(desk.unit(setting, Double.isNaN(si) ? setting.initial() : si));
         standing.set(standing(given, row));
-        badge.set(badgeText(row));
+        badge.set(badgeText());
+        origin.set(row.map(LiquidReport.Row::origin).orElse(""));
         position.set(Double.isNaN(si) ? 0 : positionOf(si));
         showText(given);
         spoken.set(setting.name() + ", " + shown + " " + unit.get().label()
@@ -172,13 +180,19 @@ public final class FieldModel {
         if (given != null) {
             return Standing.MEASURED;
         }
-        if (row.isEmpty()) {
+        Provision provision = desk.setUp().liquid().provision(property).orElse(null);
+        if (provision == null) {
             return Standing.MISSING;
         }
-        return Origins.standing(row.get().origin());
+        if (row.isEmpty()) {
+            return Standing.UNUSED;
+        }
+        return provision instanceof Provision.Correlated
+                ? Standing.CORRELATED
+                : provision instanceof Provision.Constant ? Standing.ASSUMED : Standing.MEASURED;
     }
 
-    private String badgeText(Optional<LiquidReport.Row> row) {
+    private String badgeText() {
         if (standing.get() == Standing.DEFAULT && !setting.follows().isEmpty()) {
             return "follows " + desk.declaration().setting(setting.follows()).map(Setting::name).orElse("")
                     .toLowerCase(java.util.Locale.ROOT);

@@ -72,6 +72,11 @@ final class FieldView extends VBox {
         name.setTooltip(new Tooltip(model.setting().help()));
         Label badge = Parts.label("", Mark.BADGE);
         badge.textProperty().bind(model.badgeProperty());
+        Tooltip from = new Tooltip();
+        from.textProperty().bind(model.originProperty());
+        from.setWrapText(true);
+        from.setMaxWidth(360);
+        badge.setTooltip(from);
         back.setOnAction(e -> model.release());
         back.setAccessibleText("Give " + model.setting().name() + " back to its default or correlation");
         HBox head = new HBox(5, name, Parts.symbol(model.setting().symbol()), Parts.spring(), badge, back);
@@ -105,14 +110,14 @@ final class FieldView extends VBox {
 
     private void showStanding() {
         Standing standing = model.standingProperty().get();
-        boolean hollow = standing == Standing.DEFAULT || standing == Standing.MISSING;
+        boolean hollow = standing == Standing.DEFAULT || standing == Standing.MISSING || standing == Standing.UNUSED;
         for (Standing each : Standing.values()) {
             pseudoClassStateChanged(Mark.state(each.style()), each == standing);
         }
         pseudoClassStateChanged(Mark.HOLLOW, hollow);
         back.setVisible(!model.released());
         back.setManaged(!model.released());
-        slider.setDisable(standing == Standing.MISSING);
+        slider.setDisable(standing == Standing.MISSING || standing == Standing.UNUSED);
     }
 
     private void wireSlider() {

@@ -65,7 +65,7 @@ public final class LiquidModel {
             preset.set(now);
         }
         showing = false;
-        note.set(now.map(Preset::note).orElse("Type what you measured; what is missing stays unknown."));
+        note.set(now.map(p -> p.words().note()).orElse("Type what you measured; what is missing stays unknown."));
     }
 
     private void take(Optional<Preset> chosen) {

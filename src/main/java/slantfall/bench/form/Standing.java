@@ -8,6 +8,7 @@ enum Standing {
     CORRELATED("correlated"),
     ASSUMED("assumed"),
     RANGE("unknown in a range"),
+    UNUSED("not needed here"),
     MISSING("not known");
 
     private final String word;
