@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import javafx.geometry.Pos;
 import javafx.scene.AccessibleAttribute;
+import javafx.scene.Node;
 import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
 import javafx.scene.control.Menu;
@@ -35,6 +36,7 @@ final class FieldView extends VBox {
     private final TextField field = new TextField();
     private final MenuButton unit = new MenuButton();
     private final Hyperlink back = new Hyperlink("give back");
+    private final Label badge = Parts.label("", Mark.BADGE);
     private Object gesture;
     private boolean showing;
 
@@ -70,7 +72,6 @@ final class FieldView extends VBox {
         Label name = Parts.label(model.setting().name(), Mark.NAME);
         name.setLabelFor(field);
         name.setTooltip(new Tooltip(model.setting().help()));
-        Label badge = Parts.label("", Mark.BADGE);
         badge.textProperty().bind(model.badgeProperty());
         Tooltip from = new Tooltip();
         from.textProperty().bind(model.originProperty());
@@ -111,10 +112,12 @@ final class FieldView extends VBox {
     private void showStanding() {
         Standing standing = model.standingProperty().get();
         boolean hollow = standing == Standing.DEFAULT || standing == Standing.MISSING || standing == Standing.UNUSED;
-        for (Standing each : Standing.values()) {
-            pseudoClassStateChanged(Mark.state(each.style()), each == standing);
+        for (Node node : List.of(field, slider, badge)) {
+            for (Standing each : Standing.values()) {
+                node.pseudoClassStateChanged(Mark.state(each.style()), each == standing);
+            }
+            node.pseudoClassStateChanged(Mark.HOLLOW, hollow);
         }
-        pseudoClassStateChanged(Mark.HOLLOW, hollow);
         back.setVisible(!model.released());
         back.setManaged(!model.released());
         slider.setDisable(standing == Standing.MISSING || standing == Standing.UNUSED);
