@@ -11,6 +11,7 @@ import slantfall.flow.film.NewtonianFilm;
 import slantfall.flow.film.ThicknessLaws;
 import slantfall.liquid.LiquidState;
 import slantfall.quantity.Kind;
+import slantfall.quantity.Show;
 import slantfall.source.Mark;
 import slantfall.source.Source;
 
@@ -101,7 +102,8 @@ final class FilmWorkings {
     }
 
     private String range() {
-        return "tested for Γ/μ from " + p.law().from() + " to " + p.law().to();
+        String from = "tested for Γ/μ from " + Show.number(p.law().from(), 3);
+        return Double.isInfinite(p.law().to()) ? from + " upward" : from + " to " + Show.number(p.law().to(), 3);
     }
 
     private Steps meanVelocity() {

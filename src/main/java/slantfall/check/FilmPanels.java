@@ -59,7 +59,14 @@ public final class FilmPanels {
                     c -> true));
 
     /** Every panel of a film. */
-    public static final List<Panel> PANELS = List.of(ONSET, WavinessPanel.PANEL, TurbulencePanel.PANEL, SURFACE, ENTRY);
+    public static final List<Panel> PANELS = List.of(
+            ONSET,
+            WavinessPanel.PANEL,
+            WaveStagePanels.FULL,
+            WaveStagePanels.TRANSITION,
+            TurbulencePanel.PANEL,
+            SURFACE,
+            ENTRY);
 
     /** Every check of a film. */
     public static final List<Check<FilmCase>> CHECKS = checks();
@@ -69,6 +76,7 @@ public final class FilmPanels {
     private static List<Check<FilmCase>> checks() {
         List<Check<FilmCase>> all = new ArrayList<>(OTHERS);
         all.addAll(WavinessPanel.CHECKS);
+        all.addAll(WaveStagePanels.CHECKS);
         all.addAll(TurbulencePanel.CHECKS);
         return List.copyOf(all);
     }

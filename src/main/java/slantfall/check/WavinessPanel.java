@@ -46,7 +46,7 @@ final class WavinessPanel {
                             "vertical films of silicone oils; not for water"),
                     Kind.REYNOLDS_FILM,
                     new FilmNumberLimit.Law(0.6, 0.1),
-                    c -> vertical(c) && c.filmNumber() < OILS,
+                    WavinessPanel::oil,
                     memory("al-sibai-2004", "Al-Sibai 2004")));
 
     private WavinessPanel() {}
@@ -61,8 +61,12 @@ final class WavinessPanel {
                 source);
     }
 
-    private static boolean vertical(FilmCase c) {
+    static boolean vertical(FilmCase c) {
         return c.angle() >= VERTICAL && c.stillAir();
+    }
+
+    static boolean oil(FilmCase c) {
+        return vertical(c) && c.filmNumber() < OILS;
     }
 
     private static Source memory(String key, String citation) {

@@ -3,6 +3,7 @@ package slantfall.console;
 import java.io.PrintWriter;
 import java.util.List;
 import java.util.Set;
+import slantfall.check.Cautions;
 import slantfall.declare.Assessment;
 import slantfall.declare.CheckResult;
 import slantfall.declare.Headline;
@@ -165,9 +166,8 @@ final class AssessmentText {
     private void notices(Assessment a, List<String> reports) {
         heading("Notes");
         reports.forEach(r -> out.println("  - " + r));
-        for (Notice notice : a.notices()) {
-            out.println("  - " + notice.text());
-        }
+        a.notices().stream().map(Notice::text).distinct().forEach(t -> out.println("  - " + t));
         a.cautions().forEach(c -> out.println("  ! " + c));
+        out.println("  " + Cautions.general());
     }
 }

@@ -115,7 +115,7 @@ public final class Assessor {
                 readings,
                 all,
                 panels(all),
-                LiquidReport.of(liquid, state),
+                LiquidReport.of(liquid, setUp.liquidState()),
                 profiles,
                 workings,
                 cautions,
@@ -127,7 +127,7 @@ public final class Assessor {
         for (Panel panel : declaration.panels()) {
             List<CheckResult> own = published.stream()
                     .filter(r -> r.info().panel().equals(panel.key()))
-                    .sorted(Comparator.comparingDouble(CheckResult::limit))
+                    .sorted(Comparator.comparingDouble(CheckResult::margin))
                     .toList();
             CheckResult house = all.stream()
                     .filter(r -> r.info().key().equals("house." + panel.key()))

@@ -4,11 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import java.util.stream.Stream;
-import slantfall.liquid.Liquid;
-import slantfall.liquid.LiquidState;
-import slantfall.liquid.Property;
 import slantfall.quantity.Entry;
 import slantfall.quantity.EntryContext;
 import slantfall.quantity.EntryReader;
@@ -23,21 +19,7 @@ public final class Entries {
     /** What an entry may lean on: the density of the liquid as it stands, the width if there is one. */
     public static EntryContext context(SetUp setUp, Declaration declaration) {
         double width = declaration.setting(WIDTH).map(setUp::value).orElse(Double.NaN);
-        return new EntryContext(density(setUp), width);
-    }
-
-    private static double density(SetUp setUp) {
-        Liquid liquid = setUp.liquid();
-        Set<Property> wanted = Set.of(Property.DENSITY);
-        if (liquid.provision(Property.DENSITY).isEmpty()) {
-            return Double.NaN;
-        }
-        double[] in = liquid.coordinates(wanted).stream()
-                .mapToDouble(c -> setUp.value(LiquidSettings.of(c)))
-                .toArray();
-        LiquidState state = new LiquidState();
-        liquid.evaluator(wanted).at(in, 0, state);
-        return state.density;
+        return new EntryContext(setUp.liquidState().density, width);
     }
 
     /**

@@ -3,7 +3,6 @@ package slantfall.declare;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.Collectors;
 
 /**
  * The sentence over everything: the user's own rules, the tightest limit, the regimes.
@@ -25,11 +24,7 @@ public record Headline(String sentence, String about, Verdict verdict) {
                 .findFirst();
         tightest.ifPresent(c -> parts.add((c.verdict() == Verdict.CROSSED ? "Crossed: " : "Tightest: ")
                 + c.info().name() + ", " + MarginWords.of(c) + "."));
-        String regimes = assessment.panels().stream()
-                .filter(p -> p.panel().kindOfPanel() == Panel.Sort.REGIME)
-                .map(PanelResult::phrase)
-                .filter(p -> !p.startsWith("no rule"))
-                .collect(Collectors.joining(", "));
+        String regimes = regimes(assessment);
         if (!regimes.isEmpty()) {
             parts.add(Character.toUpperCase(regimes.charAt(0)) + regimes.substring(1) + ".");
         }
@@ -37,6 +32,18 @@ public record Headline(String sentence, String about, Verdict verdict) {
                 String.join(" ", parts),
                 tightest.map(c -> c.info().key()).orElse(""),
                 tightest.map(CheckResult::verdict).orElse(Verdict.UNKNOWN));
+    }
+
+    /** The first and the last question of regime that a rule answers; the ones between stand in the panels. */
+    private static String regimes(Assessment assessment) {
+        List<String> phrases = assessment.panels().stream()
+                .filter(p -> p.panel().kindOfPanel() == Panel.Sort.REGIME)
+                .filter(p -> p.results().stream().anyMatch(CheckResult::counts))
+                .map(PanelResult::phrase)
+                .toList();
+        return phrases.size() < 3
+                ? String.join(", ", phrases)
+                : phrases.get(0) + ", " + phrases.get(phrases.size() - 1);
     }
 
     private static String ownRules(List<CheckResult> own, List<CheckResult> crossed) {

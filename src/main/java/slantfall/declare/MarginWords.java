@@ -1,6 +1,6 @@
 package slantfall.declare;
 
-import java.util.Locale;
+import slantfall.quantity.Show;
 
 /** A margin in words: how much of the value is in hand. */
 public final class MarginWords {
@@ -40,8 +40,6 @@ public final class MarginWords {
     }
 
     private static String number(double value) {
-        return value >= 1e4 ? String.format(Locale.ROOT, "%.0e", value)
-                : value >= 10 ? String.format(Locale.ROOT, "%.0f", value)
-                : String.format(Locale.ROOT, "%.2g", value);
+        return Show.number(value, 2);
     }
 }

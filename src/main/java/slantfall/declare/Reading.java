@@ -10,7 +10,7 @@ import slantfall.quantity.Kind;
  * @param symbol symbol used in formulas
  * @param kind kind of quantity
  * @param scale how distances from a requirement are measured
- * @param span for a linear reading, the difference that counts as one margin [SI]
+ * @param span where a bound is zero or negative, the difference that counts as one margin [SI]
  * @param help one sentence: meaning, sign, place
  */
 public record Reading(String key, String name, String symbol, Kind kind, Scale scale, double span, String help) {
@@ -20,8 +20,8 @@ public record Reading(String key, String name, String symbol, Kind kind, Scale s
         return new Reading(key, name, symbol, kind, Scale.LOG, 1, help);
     }
 
-    /** A quantity that may have either sign. */
+    /** A quantity that may have either sign: a positive bound counts by ratio, any other by difference over the span. */
     public static Reading signed(String key, String name, String symbol, Kind kind, double span, String help) {
-        return new Reading(key, name, symbol, kind, Scale.LINEAR, span, help);
+        return new Reading(key, name, symbol, kind, Scale.LOG, span, help);
     }
 }

@@ -63,7 +63,8 @@ public record Requirement(
         return Math.min(low, high);
     }
 
-    private static Scale scaleAt(Reading declared, double bound) {
+    /** How a distance from a bound is measured: by ratio from a positive one, by difference from any other. */
+    static Scale scaleAt(Reading declared, double bound) {
         return bound > 0 ? declared.scale() : Scale.LINEAR;
     }
 }

@@ -75,7 +75,7 @@ public final class Rules {
                 "Requirement on " + reading.name().toLowerCase(java.util.Locale.ROOT),
                 reading.kind(),
                 side,
-                reading.scale(),
+                Requirement.scaleAt(reading, lower ? requirement.atLeast() : requirement.atMost()),
                 reading.span(),
                 CheckInfo.NEAR,
                 reading.symbol() + sign + "limit",

@@ -7,6 +7,7 @@ import java.util.Set;
 import java.util.TreeSet;
 import java.util.stream.Collectors;
 import slantfall.liquid.Liquid;
+import slantfall.liquid.LiquidState;
 import slantfall.liquid.Property;
 
 /**
@@ -57,6 +58,18 @@ public record SetUp(
                 .flatMap(k -> java.util.Arrays.stream(Property.values()).filter(p -> p.key().equals(k)))
                 .collect(Collectors.toSet());
         return Liquid.of(base.preset(), measured, base.points());
+    }
+
+    /** Every known property of the liquid at this state, whether the arrangement uses it or not. */
+    public LiquidState liquidState() {
+        Liquid liquid = liquid();
+        Set<Property> all = java.util.EnumSet.allOf(Property.class);
+        double[] in = liquid.coordinates(all).stream()
+                .mapToDouble(c -> value(LiquidSettings.of(c)))
+                .toArray();
+        LiquidState state = new LiquidState();
+        liquid.evaluator(all).at(in, 0, state);
+        return state;
     }
 
     /** Everything that is no number. */

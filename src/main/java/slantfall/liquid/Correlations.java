@@ -27,6 +27,8 @@ public final class Correlations {
                     GlycerolWater.VOLK, "ideal mixing × [1 + A sin(w^1.31 π)^0.81]").strengths(0, 1).within(0.0007),
             viscosity(Laliberte.SODIUM_CHLORIDE),
             density(Laliberte.SODIUM_CHLORIDE),
+            Law.pure("mao-duan-2009-sodium-chloride-viscosity", Property.VISCOSITY, MaoDuan::viscosity, SR6, MaoDuan.SOURCE,
+                    "μ_w exp(Am + Bm² + Cm³)").strengths(0, 0.259),
             viscosity(Laliberte.SODIUM_HYDROXIDE),
             density(Laliberte.SODIUM_HYDROXIDE),
             viscosity(Laliberte.SUCROSE),

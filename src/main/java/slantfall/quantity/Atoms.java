@@ -29,7 +29,8 @@ final class Atoms {
         "N: N newton newtons", "mN: mN", "MN: MN", "kN: kN", "dyn: dyn dyne dynes", "lbf: lbf", "kgf: kgf", "kp: kp",
         "Pa: Pa pascal pascals", "mPa: mPa", "uPa: uPa", "kPa: kPa", "hPa: hPa", "MPa: MPa", "bar: bar bars",
         "mbar: mbar millibar", "psi: psi", "psf: psf", "atm: atm", "Torr: Torr torr",
-        "mPa s: mPas", "Pa s: Pas", "uPa s: uPas", "mPa sn: mPasn", "P: P poise", "cP: cP cps cp centipoise",
+        "mPa s: mPas", "Pa s: Pas", "uPa s: uPas", "MPa s: MPas", "mPa sn: mPasn", "P: P poise",
+        "cP: cP cps cp centipoise",
         "St: St stokes stoke", "cSt: cSt cst centistokes centistoke",
         "J: J joule joules", "kJ: kJ", "MJ: MJ", "Btu: Btu btu BTU", "cal: cal", "kcal: kcal", "W: W watt watts",
         "kW: kW", "mW: mW", "MW: MW", "hp: hp horsepower", "Btu h^-1: Btuh",
@@ -57,7 +58,7 @@ final class Atoms {
     private Atoms() {
     }
 
-    /** What a word stands for, as powers of the plain words; several where its case does not decide, none if unknown. */
+    /** Meanings of a word as powers of the plain words: several where its case does not decide, none if unknown. */
     static List<Map<String, Integer>> of(String word) {
         Map<String, Integer> exact = EXACT.get(word);
         if (exact != null) {

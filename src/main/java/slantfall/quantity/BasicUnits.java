@@ -92,16 +92,16 @@ final class BasicUnits {
                 Unit.of("1/in", 1 / INCH, NIST), Unit.of("1/ft", 1 / FOOT, NIST));
     }
 
-    static List<Unit> acceleration() {
-        return List.of(Unit.of("m/s2", 1, SI), Unit.of("ft/s2", FOOT, NIST));
-    }
-
     static List<Unit> velocity() {
         return List.of(Unit.of("m/s", 1, SI), Unit.of("mm/s", 1e-3, SI), Unit.of("cm/s", 1e-2, SI),
                 Unit.of("m/min", 1 / MINUTE, SI), Unit.of("m/h", 1 / HOUR, SI), Unit.of("km/h", 1000 / HOUR, SI),
                 Unit.of("mm/min", 1e-3 / MINUTE, SI), Unit.of("ft/s", FOOT, NIST),
                 Unit.of("ft/min", FOOT / MINUTE, NIST), Unit.of("in/s", INCH, NIST),
                 Unit.of("in/min", INCH / MINUTE, NIST));
+    }
+
+    static List<Unit> acceleration() {
+        return List.of(Unit.of("m/s2", 1, SI), Unit.of("ft/s2", FOOT, NIST));
     }
 
     static List<Unit> temperature() {

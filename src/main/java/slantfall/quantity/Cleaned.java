@@ -22,7 +22,7 @@ final class Cleaned {
             Map.entry('\u2202', "d"), Map.entry('\u2113', "L"), Map.entry('\u212A', "K"), Map.entry('\uFF05', "%"),
             Map.entry('\u2236', ":"), Map.entry('\t', " "), Map.entry('\u2002', " "), Map.entry('\u2003', " "),
             Map.entry('\u202F', "\u00A0"), Map.entry('\u2009', "\u00A0"), Map.entry('\u2007', "\u00A0"),
-            Map.entry('\u200A', "\u00A0"), Map.entry('é', "e"), Map.entry('É', "E"));
+            Map.entry('\u200A', "\u00A0"), Map.entry('\u207F', "^n"), Map.entry('é', "e"), Map.entry('É', "E"));
 
     private Cleaned() {
     }
@@ -40,10 +40,16 @@ final class Cleaned {
             throw QuantityProblem.plain(quote(bare) + " is longer than " + LONGEST_ENTRY + " characters",
                     "Type one number and its unit");
         }
-        if (bare.chars().anyMatch(c -> c != '\t' && Character.isISOControl(c))) {
-            throw QuantityProblem.plain(quote(bare) + " holds control characters", "Type one number and its unit");
+        if (bare.chars().anyMatch(Cleaned::invisible)) {
+            throw QuantityProblem.plain(quote(bare) + " holds invisible characters", "Type one number and its unit");
         }
         return trimmed(plain(bare));
+    }
+
+    private static boolean invisible(int c) {
+        int type = Character.getType(c);
+        return c != '\t' && Character.isISOControl(c) || type == Character.FORMAT || type == Character.LINE_SEPARATOR
+                || type == Character.PARAGRAPH_SEPARATOR;
     }
 
     /** The text quoted for a message: one line, shortened, nothing unprintable. */
@@ -52,8 +58,8 @@ final class Cleaned {
         int end = Math.min(text.length(), LONGEST_QUOTE);
         for (int i = 0; i < end; i++) {
             char c = text.charAt(i);
-            out.append(Character.isISOControl(c) || Character.isSurrogate(c) || Character.isWhitespace(c) && c != ' '
-                    || Character.getType(c) == Character.FORMAT ? '?' : c);
+            boolean odd = c == '\t' || invisible(c) || Character.isSurrogate(c);
+            out.append(odd ? '?' : c);
         }
         return out.append(text.length() > end ? "…\"" : "\"").toString();
     }

@@ -2,16 +2,22 @@ package slantfall.quantity;
 
 import java.util.ArrayList;
 import java.util.EnumMap;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * Which unit a quantity is shown in. Each kind has, per system, a short ladder of units from large to small; the
- * largest in which the number is at least one is taken.
+ * largest in which the number is at least one (a tenth for some metric ones) is taken.
  */
 public final class Display {
 
     private static final Map<Kind, List<List<Unit>>> LADDERS = new EnumMap<>(Kind.class);
+
+    /** Kinds whose metric units are used down to a tenth: 0.8 mm of film and 0.4 m of width, not 800 µm and 400 mm. */
+    private static final Set<Kind> IN_TENTHS = EnumSet.of(Kind.LENGTH, Kind.HEAD, Kind.AREA, Kind.VOLUME, Kind.VELOCITY,
+            Kind.VOLUME_FLOW, Kind.VOLUME_FLOW_PER_WIDTH);
 
     static {
         put(Kind.ANGLE, "deg", "deg", "deg");
@@ -26,7 +32,7 @@ public final class Display {
         put(Kind.GROWTH_RATE, "1/m", "1/m", "1/ft");
         put(Kind.MASS_FLOW, "kg/s|g/s", "t/h|kg/h", "lb/h");
         put(Kind.VOLUME_FLOW, "m3/s|L/s|cm3/s", "m3/h|L/h|cm3/min", "gal/min|gal/h");
-        put(Kind.MASS_FLOW_PER_WIDTH, "kg/(m s)|g/(m s)", "kg/(m h)", "lb/(h ft)");
+        put(Kind.MASS_FLOW_PER_WIDTH, "kg/(m s)", "kg/(m h)", "lb/(h ft)");
         put(Kind.VOLUME_FLOW_PER_WIDTH, "m2/s|cm2/s|mm2/s", "L/(h cm)|L/(h m)", "gal/(min ft)|gal/(h ft)");
         put(Kind.PRESSURE_DIFFERENCE, "MPa|kPa|Pa", "bar|mbar|Pa", "psi|in of water");
         put(Kind.PRESSURE_ABSOLUTE, "MPa(a)|kPa(a)|Pa", "bar(a)|mbar(a)|Pa", "psi(a)");
@@ -45,6 +51,7 @@ public final class Display {
         put(Kind.FRACTION, "%", "%", "%");
         put(Kind.CONDUCTIVITY, "W/(m K)|mW/(m K)", "W/(m K)|mW/(m K)", "Btu/(h ft degF)");
         put(Kind.HEAT_CAPACITY, "kJ/(kg K)|J/(kg K)", "kJ/(kg K)|J/(kg K)", "Btu/(lb degF)");
+        put(Kind.LATENT_HEAT, "kJ/kg|J/kg", "kJ/kg|J/kg", "Btu/lb");
         put(Kind.HEAT_FLUX, "kW/m2|W/m2", "kW/m2|W/m2", "Btu/(h ft2)");
         put(Kind.HEAT_TRANSFER_COEFFICIENT, "kW/(m2 K)|W/(m2 K)", "kW/(m2 K)|W/(m2 K)", "Btu/(h ft2 degF)");
         put(Kind.POWER, "MW|kW|W", "MW|kW|W", "hp|Btu/h");
@@ -68,11 +75,15 @@ public final class Display {
      */
     public static Unit unit(Kind kind, UnitSystem system, double si) {
         List<Unit> ladder = ladder(kind, system);
-        if (si == 0 || Double.isNaN(si)) {
+        if (si == 0) {
+            return ladder.stream().filter(u -> u.scale() == 1 && u.offset() == 0).findFirst().orElse(ladder.get(ladder.size() - 1));
+        }
+        if (Double.isNaN(si)) {
             return ladder.get(0);
         }
+        double from = system != UnitSystem.US && IN_TENTHS.contains(kind) ? 0.1 : 1;
         for (Unit unit : ladder) {
-            if (Math.abs(unit.fromSi(si)) >= 1) {
+            if (Math.abs(unit.fromSi(si)) >= from) {
                 return unit;
             }
         }

@@ -12,7 +12,8 @@ final class FractionReader {
     private static final Pattern MASS = Pattern.compile("\\(?(?:" + BY_MASS + ")\\)?[ -]?%|% ?\\(?("
             + BY_MASS + "|" + SOLIDS + ")\\)?", Pattern.CASE_INSENSITIVE);
     private static final Pattern VOLUME = Pattern.compile(
-            "(?:vol\\.?|v/v|v)[ -]?%|% ?\\(?(?:vol\\.?|v/v|by volume|volume|w/v|m/v|abv)\\)?", Pattern.CASE_INSENSITIVE);
+            "(?:vol\\.?|v/v|v)[ -]?%|% ?\\(?(?:vol\\.?|v/v|by volume|volume|w/v|m/v|abv)\\)?",
+            Pattern.CASE_INSENSITIVE);
 
     private FractionReader() {
     }

@@ -7,7 +7,7 @@ import java.util.List;
 final class LinearReader {
 
     /** Digits of a converted value in an echo; the value itself keeps all. */
-    static final int ECHO_DIGITS = 4;
+    static final int ECHO_DIGITS = 5;
     private static final double LARGEST_COUNT = 9.0e15;
 
     private LinearReader() {

@@ -50,7 +50,8 @@ record NumberText(double value, String shown, String rest) {
     private static String digits(String text, String exponent, String entry) {
         if (text.indexOf(Cleaned.GROUPING) >= 0) {
             if (!GROUPED.matcher(text).matches()) {
-                throw QuantityProblem.plain(Cleaned.quote(entry) + " has digits that are not grouped in threes", REMEDY);
+                throw QuantityProblem.plain(Cleaned.quote(entry) + " has digits that are not grouped in threes",
+                        REMEDY);
             }
             return text.replace(String.valueOf(Cleaned.GROUPING), "").replace(',', '.');
         }

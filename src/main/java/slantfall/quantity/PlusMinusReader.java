@@ -8,11 +8,11 @@ final class PlusMinusReader {
 
     private static final Pattern SIGN = Pattern.compile("^(?:±|\\+ ?/ ?-|\\+-|plus ?(?:or)? ?-?minus) ?",
             Pattern.CASE_INSENSITIVE);
-    private static final Pattern RELATIVE = Pattern.compile("(?:%|per ?cent|percent) ?(?:of (?:the )?value|relative|rel\\.?)",
-            Pattern.CASE_INSENSITIVE);
+    private static final Pattern RELATIVE = Pattern.compile(
+            "(?:%|per ?cent) ?(?:of (?:the )?value|relative|rel\\.?)", Pattern.CASE_INSENSITIVE);
     private static final Pattern POINTS = Pattern.compile("(?:%|percentage)? ?(?:points?|absolute|abs\\.?)",
             Pattern.CASE_INSENSITIVE);
-    private static final Pattern PER_CENT = Pattern.compile("%|per ?cent|percent", Pattern.CASE_INSENSITIVE);
+    private static final Pattern PER_CENT = Pattern.compile("%|per ?cent", Pattern.CASE_INSENSITIVE);
 
     private PlusMinusReader() {
     }
@@ -36,7 +36,7 @@ final class PlusMinusReader {
             refuseUnclearPerCent(typed, number, share);
             return relative(typed, number, centreSi);
         }
-        return absolute(typed, number);
+        return absolute(typed);
     }
 
     private static void refuseUnclearPerCent(Typed typed, NumberText number, boolean share) {
@@ -63,15 +63,15 @@ final class PlusMinusReader {
                 + Show.joined(Show.trimmed(si, LinearReader.ECHO_DIGITS), typed.kind().si()));
     }
 
-    private static Entry absolute(Typed typed, NumberText number) {
+    private static Entry absolute(Typed typed) {
         Kind kind = differenceKind(typed.kind());
         Typed asDifference = new Typed(typed.text(), typed.clean(), kind, typed.context());
-        if (typed.kind() == Kind.ANGLE && !number.rest().isEmpty()) {
-            // A slope is no difference of angles: only plain angles are.
-            Unit unit = UnitIndex.find(asDifference, number.rest());
-            return widened(typed, LinearReader.inUnit(asDifference, number, unit));
-        }
-        return widened(typed, EntryReader.read(typed.clean(), kind, typed.context()));
+        return switch (kind) {
+            // No difference can be told in slopes, degrees Baumé or tube gauges: they are not proportional.
+            case ANGLE, DENSITY -> widened(typed, LinearReader.read(asDifference));
+            case LENGTH -> widened(typed, TubeReader.plain(asDifference));
+            default -> widened(typed, EntryReader.read(typed.clean(), kind, typed.context()));
+        };
     }
 
     private static Entry widened(Typed typed, Entry half) {

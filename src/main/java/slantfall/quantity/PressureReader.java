@@ -59,8 +59,7 @@ final class PressureReader {
     }
 
     private static Entry absolute(Typed typed, NumberText number, String unitText, String qualifier) {
-        Typed asDifference = new Typed(typed.text(), typed.clean(), Kind.PRESSURE_DIFFERENCE, typed.context());
-        Unit base = UnitIndex.find(asDifference, unitText);
+        Unit base = UnitIndex.find(typed, unitText, Kind.PRESSURE_DIFFERENCE);
         if (qualifier.isEmpty() && !base.symbol().equals("Pa")) {
             throw unstated(typed, number, base);
         }

@@ -22,6 +22,8 @@ final class SlopeReader {
             UnitText.formOf("%"), 0.01, UnitText.formOf("mm/m"), 1e-3, UnitText.formOf("cm/m"), 1e-2,
             UnitText.formOf("in/ft"), 1.0 / 12, UnitText.formOf("m/m"), 1.0);
 
+    private static final int DEGREE_DIGITS = 4;
+
     private SlopeReader() {
     }
 
@@ -65,14 +67,15 @@ final class SlopeReader {
     }
 
     private static String degrees(double si) {
-        return Show.trimmed(Math.rint(Math.toDegrees(si) * 1e9) / 1e9, LinearReader.ECHO_DIGITS) + "°";
+        return Show.trimmed(Math.rint(Math.toDegrees(si) * 1e9) / 1e9, DEGREE_DIGITS) + "°";
     }
 
     private static Entry ratio(Typed typed, NumberText rise, Matcher rest) {
         NumberText run = NumberText.first(Cleaned.trimmed(rest.group(2)));
         Matcher way = RATIO_END.matcher(run.rest());
         if (!way.matches()) {
-            throw typed.refused("has " + Cleaned.quote(run.rest()) + " after its ratio", "Type 1:12, 1:12 tan or 1:12 sin");
+            throw typed.refused("has " + Cleaned.quote(run.rest()) + " after its ratio",
+                    "Type 1:12, 1:12 tan or 1:12 sin");
         }
         if (run.value() == 0) {
             throw typed.refused("divides by zero", "Type a ratio such as 1:12, or the angle in deg");
@@ -86,9 +89,10 @@ final class SlopeReader {
     }
 
     private static QuantityProblem inWords(Typed typed, double share) {
-        String sine = Math.abs(share) > 1 ? "impossible" : degrees(Math.asin(share));
+        String sine = Math.abs(share) > 1 ? "no angle" : degrees(Math.asin(share));
         return typed.ambiguous("may be counted along the run or along the slope",
-                List.of(degrees(Math.atan(share)) + " (tan, over the run)", sine + " (sin, over the length of the slope)"),
+                List.of(degrees(Math.atan(share)) + " (tan, over the run)",
+                        sine + " (sin, over the length of the slope)"),
                 "Add tan or sin");
     }
 

@@ -8,12 +8,13 @@ final class Sources {
 
     static final Source SI = Source.of("si-brochure-9",
             "BIPM, The International System of Units (SI Brochure), 9th edition, 2019", Mark.FROM_MEMORY);
+    /** Base factors read in a transcription of the table; compounds are products of them. */
     static final Source NIST = new Source("nist-sp-811",
-            "Thompson and Taylor, Guide for the Use of the SI, NIST Special Publication 811, 2008", "appendix B.8",
-            Mark.FROM_MEMORY);
+            "Thompson and Taylor, Guide for the Use of the SI, NIST Special Publication 811, 2008", "appendix B.9",
+            Mark.SECOND_HAND);
     /** Density of water at its greatest, near 4 °C: a5 of the equation. */
     static final Source WATER_4C = new Source("tanaka-2001",
-            "Tanaka et al. 2001, Metrologia 38, 301-309", "a5 of equation 1", Mark.FROM_MEMORY);
+            "Tanaka et al. 2001, Metrologia 38, 301-309", "a5 of table 1", Mark.SECOND_HAND);
     static final Source BAUME = Source.of("nbs-baume",
             "US National Bureau of Standards scale for liquids heavier than water, 145/(145 - °Bé), 60/60 °F",
             Mark.FROM_MEMORY);

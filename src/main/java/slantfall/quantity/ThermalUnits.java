@@ -32,6 +32,12 @@ final class ThermalUnits {
                 Unit.of("kcal/(kg K)", 1000 * CALORIE, NIST, "cal/(g K)").noted(TABLE));
     }
 
+    static List<Unit> latentHeat() {
+        return List.of(Unit.of("J/kg", 1, SI), Unit.of("kJ/kg", 1e3, SI),
+                Unit.of("Btu/lb", BTU / POUND, NIST).noted(TABLE),
+                Unit.of("kcal/kg", 1000 * CALORIE, NIST).noted(TABLE));
+    }
+
     static List<Unit> heatFlux() {
         return List.of(Unit.of("W/m2", 1, SI), Unit.of("kW/m2", 1e3, SI), Unit.of("W/cm2", 1e4, SI),
                 Unit.of("Btu/(h ft2)", BTU / (HOUR * FOOT * FOOT), NIST).noted(TABLE),

@@ -8,7 +8,7 @@ import java.util.regex.Pattern;
 final class TubeReader {
 
     private static final Pattern GAUGE = Pattern.compile(
-            "(.*?) ?(?:od|o\\.d\\.)? ?[x*,] ?([0-9]{1,2}) ?(?:bwg|ga\\.? bwg)", Pattern.CASE_INSENSITIVE);
+            "(.*?) ?(?:od|o\\.d\\.)?[ x*,]+([0-9]{1,2}) ?(?:bwg|ga\\.? bwg)", Pattern.CASE_INSENSITIVE);
     private static final Pattern INSIDE = Pattern.compile(
             "(.*?[^ ]) ?(?:\\b|(?<=[\"']))(?:id|i\\.d\\.|inside(?: diameter)?)", Pattern.CASE_INSENSITIVE);
     private static final Pattern OUTSIDE = Pattern.compile(
@@ -38,7 +38,8 @@ final class TubeReader {
         return FRACTION.matcher(typed.clean()).matches() ? Optional.of(plain(typed)) : Optional.empty();
     }
 
-    private static Entry plain(Typed typed) {
+    /** A length without the words of tubes; fractions of an inch are read. */
+    static Entry plain(Typed typed) {
         Matcher m = FRACTION.matcher(typed.clean());
         if (!m.matches()) {
             return LinearReader.read(typed);

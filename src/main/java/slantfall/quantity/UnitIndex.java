@@ -23,6 +23,11 @@ final class UnitIndex {
      * @param unitText the cleaned unit expression
      */
     static Unit find(Typed typed, String unitText) {
+        return find(typed, unitText, typed.kind());
+    }
+
+    /** The unit meant among those of another kind: an absolute pressure takes the units of a difference. */
+    static Unit find(Typed typed, String unitText, Kind searched) {
         UnitText text = UnitText.of(unitText);
         if (text.forms().size() > 1) {
             throw caseMatters(typed, text);
@@ -31,7 +36,7 @@ final class UnitIndex {
             throw unknown(typed, unitText, text.unknown());
         }
         String form = text.forms().iterator().next();
-        Unit unit = accepted(typed.kind()).get(form);
+        Unit unit = accepted(searched).get(form);
         if (unit == null) {
             throw wrongKind(typed, unitText, form);
         }
@@ -70,7 +75,8 @@ final class UnitIndex {
 
     private static QuantityProblem unknown(Typed typed, String unitText, String word) {
         if (unitText.matches("(?s).*(^|[ x*])[+-]?[0-9]+([.,][0-9]+)?( .*|$)")) {
-            return QuantityProblem.plain(typed.quoted() + " holds more than one number", "Type one number and its unit");
+            return QuantityProblem.plain(typed.quoted() + " holds more than one number",
+                    "Type one number and its unit");
         }
         return QuantityProblem.plain(typed.quoted() + ": the unit " + Cleaned.quote(word.isEmpty() ? unitText : word)
                 + " is not known", "For " + withArticle(typed.kind().words()) + " use " + likely(typed.kind()));

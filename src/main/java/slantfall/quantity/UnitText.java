@@ -1,6 +1,7 @@
 package slantfall.quantity;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -22,25 +23,26 @@ import java.util.regex.Pattern;
 record UnitText(Set<String> forms, String unknown) {
 
     private static final Pattern TOKEN = Pattern.compile(
-            "([A-Za-z°%'\"]+)(?:\\^?([+-]?[0-9]{1,2})(?![0-9])|\\^\\(([+-]?[0-9]{1,2})\\))?|([0-9]+)|([/*().\\s\u00A0])");
-    private static final String[][] WORDS = {
-        {"(?i)\\bu\\.?s\\.? ?gal", "usgal"}, {"(?i)\\b(?:imp(?:erial)?\\.?|u\\.?k\\.?) ?gal", "impgal"},
-        {"(?i)\\b(?:imp(?:erial)?\\.?|u\\.?k\\.?) ?gpm", "impgpm"}, {"(?i)\\bu\\.?s\\.? ?gpm", "gpm"},
-        {"(?i)\\b(?:sq\\.?|square) ?([a-z]+)", "$1^2"}, {"(?i)\\b(?:cu\\.?|cubic) ?([a-z]+)", "$1^3"},
-        {"(?i) ?(?:\\bof\\b)? ?(?<=\\b|mm|cm|in|ft|m)(?:h2o|w\\.?c\\.?|w\\.?g\\.?)(?![a-z0-9])\\.?", " water"},
-        {"(?i) ?(?:\\bof\\b)? ?\\bwater (?:column|gauge)\\b", " water"}, {"(?<=mm|cm|in)Hg\\b", " Hg"},
-        {"(?i)\\bof\\b", " "}, {"(?i)\\bper\\b", "/"}, {"s\\^n\\b", "sn"},
-        {"(?<=[A-Za-z])-(?=[A-Za-z])", " "}, {"\\*\\*", "^"}, {"° (?=[CF]\\b|B[xr])", "°"}, {"(?i)\\bdeg (?=[CF]\\b)", "°"},
-        {"(?i)\\bdeg\\.? brix\\b", "Bx"}
-    };
-
+            "([A-Za-z°%'\"]+)(?:\\^?([+-]?[0-9]{1,2})(?![0-9])|\\^\\(([+-]?[0-9]{1,2})\\))?"
+            + "|([0-9]+)|([/*().\\s\u00A0])");
     private static final int MOST_FORMS = 8;
 
     /** Takes a cleaned unit expression apart. */
     static UnitText of(String text) {
+        if (!text.contains("°") && !text.contains(".") && !text.contains("deg ") && !text.contains("degree")) {
+            UnitText asItStands = new Parser(text).parse();
+            if (asItStands.unknown.isEmpty()) {
+                return asItStands;
+            }
+        }
+        return inWords(text);
+    }
+
+    // Kept apart because most expressions need none of it, and reading the first file should not wait for it.
+    private static UnitText inWords(String text) {
         String plain = text;
-        for (String[] word : WORDS) {
-            plain = plain.replaceAll(word[0], word[1]);
+        for (int i = 0; i < Words.SEEN.length; i++) {
+            plain = Words.SEEN[i].matcher(plain).replaceAll(Words.WORDS[i][1]);
         }
         return new Parser(plain).parse();
     }
@@ -54,6 +56,24 @@ record UnitText(Set<String> forms, String unknown) {
         return text.forms.iterator().next();
     }
 
+    /** Words and spellings that stand for something else, and what they stand for. */
+    private static final class Words {
+        static final String[][] WORDS = {
+            {"(?i)\\bu\\.?s\\.? ?gal(?:lons?|s)?", "usgal"},
+            {"(?i)\\b(?:imp(?:erial)?\\.?|u\\.?k\\.?) ?gal(?:lons?|s)?", "impgal"},
+            {"(?i)\\b(?:imp(?:erial)?\\.?|u\\.?k\\.?) ?gpm", "impgpm"}, {"(?i)\\bu\\.?s\\.? ?gpm", "gpm"},
+            {"(?i)\\b(?:square|sq\\.?) ?([a-z]+)", "$1^2"}, {"(?i)\\b(?:cubic|cu\\.?) ?([a-z]+)", "$1^3"},
+            {"(?i) ?(?:\\bof\\b)? ?(?<=\\b|mm|cm|in|ft|m)(?:h2o|w\\.?c\\.?|w\\.?g\\.?)(?![a-z0-9])\\.?", " water"},
+            {"(?i) ?(?:\\bof\\b)? ?\\bwater (?:column|gauge)\\b", " water"}, {"(?<=mm|cm|in)Hg\\b", " Hg"},
+            {"(?i)\\bof\\b", " "}, {"(?i)\\bper\\b", "/"}, {"s\\^n\\b", "sn"},
+            {"(?<=[A-Za-z])-(?=[A-Za-z])", " "}, {"\\*\\*", "^"}, {"° (?=[CF]\\b|B[xr])", "°"},
+            {"(?i)\\bdeg(?:rees?)?\\.? ?(?=[CF]\\b)", "°"},
+            {"(?i)\\bdeg\\.? brix\\b", "Bx"}
+        };
+
+        static final Pattern[] SEEN = Arrays.stream(WORDS).map(w -> Pattern.compile(w[0])).toArray(Pattern[]::new);
+    }
+
     private static final class Parser {
         private final String text;
         private final int[] signs;
@@ -61,6 +81,7 @@ record UnitText(Set<String> forms, String unknown) {
         private int depth;
         private int slashDepth = -1;
         private int sign = 1;
+        private boolean expecting;
 
         Parser(String text) {
             this.text = text;
@@ -80,12 +101,13 @@ record UnitText(Set<String> forms, String unknown) {
                 if (m.group(4) != null) {
                     number(m.group(4));
                 }
+                expecting &= m.group(5) != null;
                 if (m.group(5) != null && !operator(m.group(5).charAt(0))) {
                     return unknown(text.substring(at));
                 }
                 at = m.end();
             }
-            return depth == 0 ? new UnitText(forms(), "") : unknown(text);
+            return depth == 0 && !expecting ? new UnitText(forms(), "") : unknown(text);
         }
 
         private static UnitText unknown(String word) {
@@ -110,7 +132,12 @@ record UnitText(Set<String> forms, String unknown) {
             }
         }
 
+        // A slash, a dot or an opening bracket promises something after it.
         private boolean operator(char c) {
+            if (expecting && (c == '/' || c == '*' || c == ')')) {
+                return false;
+            }
+            expecting |= c == '/' || c == '*' || c == '(';
             if (c == '/') {
                 boolean nested = sign < 0 && depth > slashDepth;
                 sign = -1;

@@ -74,7 +74,7 @@ class MarginTest {
         assertThat(words(Side.AT_LEAST, Math.log(2))).isEqualTo("50 % in hand");
         assertThat(words(Side.AT_MOST, -Math.log(1.3))).isEqualTo("over by 30 %");
         assertThat(words(Side.AT_LEAST, -Math.log(2))).isEqualTo("short by 50 %");
-        assertThat(words(Side.AT_MOST, Math.log(8))).isEqualTo("factor 8 in hand");
+        assertThat(words(Side.AT_MOST, Math.log(8))).isEqualTo("factor 8.0 in hand");
         assertThat(words(Side.AT_MOST, -20)).isEqualTo("nothing in hand");
     }
 

@@ -3,6 +3,9 @@ package slantfall.flow.film;
 /** Dimensionless numbers of a film, each under the name of its definition. */
 public final class FilmNumbers {
 
+    /** Cosine of an angle that is a right one but for rounding. */
+    private static final double UPRIGHT = 1e-12;
+
     private FilmNumbers() {}
 
     /** Γ/μ, the Reynolds number on mean velocity and thickness. */
@@ -29,7 +32,8 @@ public final class FilmNumbers {
      * @param angle angle from the horizontal, above 0 [rad]
      */
     public static double onset(double angle) {
-        return 5.0 / 6 * Math.max(0, Math.cos(angle) / Math.sin(angle));
+        double cos = Math.cos(angle);
+        return cos < UPRIGHT ? 0 : 5.0 / 6 * cos / Math.sin(angle);
     }
 
     /** Pr = μ c_p/k. */

@@ -45,8 +45,9 @@ public final class TaperedSlot {
     /**
      * Lowest pressure above that at the inlet, ends included [Pa].
      *
-     * <p>dp/dx b³ = ρg_s b³ + 6μUb − 12μq is a cubic in b; its roots inside the slot are where the pressure turns. The
-     * sign changes of dp/dx are bracketed on a fixed grid and refined by bisection.
+     * <p>dp/dx b³ = ρg_s b³ + 6μUb − 12μq is a cubic in b without a square term. It is monotone on either side of b =
+     * √(−2μU/(ρg_s)), if that lies inside the slot, so that each side has at most one place where the pressure turns,
+     * which bisection finds.
      */
     public static double lowestPressure(double flow, double viscosity, Shape shape, Drive drive) {
         double length = shape.length();
@@ -54,22 +55,25 @@ public final class TaperedSlot {
         if (shape.inlet() == shape.outlet()) {
             return lowest;
         }
-        double before = slope(flow, viscosity, shape, drive, 0);
-        for (int i = 1; i <= GRID; i++) {
-            double after = slope(flow, viscosity, shape, drive, length * i / GRID);
-            if (before < 0 && after >= 0) {
-                double x = turn(flow, viscosity, shape, drive, length * (i - 1) / GRID, length * i / GRID);
-                lowest = Math.min(lowest, pressure(flow, viscosity, shape, drive, x));
-            }
-            before = after;
-        }
-        return lowest;
+        double split = split(viscosity, shape, drive);
+        double first = turn(flow, viscosity, shape, drive, 0, split);
+        double second = turn(flow, viscosity, shape, drive, split, length);
+        return Math.min(lowest, Math.min(
+                pressure(flow, viscosity, shape, drive, first), pressure(flow, viscosity, shape, drive, second)));
     }
 
-    /** The cubic has at most three roots in b, far fewer than the grid has cells. */
-    private static final int GRID = 8;
+    /** Where the cubic is stationary, the outlet if it is monotone along the slot [m]. */
+    private static double split(double viscosity, Shape shape, Drive drive) {
+        double gap = Math.sqrt(-2 * viscosity * drive.wallSpeed() / drive.weight());
+        double x = (gap - shape.inlet()) / (shape.outlet() - shape.inlet()) * shape.length();
+        return x > 0 && x < shape.length() ? x : shape.length();
+    }
 
+    /** Where the pressure turns from falling to rising between two places, else an end [m]. */
     private static double turn(double flow, double viscosity, Shape shape, Drive drive, double from, double to) {
+        if (slope(flow, viscosity, shape, drive, from) >= 0 || slope(flow, viscosity, shape, drive, to) < 0) {
+            return to;
+        }
         double low = from;
         double high = to;
         for (int i = 0; i < 40; i++) {
