@@ -19,6 +19,8 @@ import slantfall.bench.model.Pulse;
 import slantfall.bench.shell.BenchWindow;
 import slantfall.bench.shell.Chooser;
 import slantfall.bench.shell.FileDesk;
+import slantfall.bench.shell.StoreDesk;
+import slantfall.session.DirectScheduler;
 import slantfall.session.Session;
 
 /** Writes pictures of the window in its sizes and looks, to be looked at by a person. Argument: a folder. */
@@ -43,7 +45,7 @@ public final class BenchShot {
     /** Entry point. */
     public static void main(String[] args) throws Exception {
         Path folder = Files.createDirectories(Path.of(args[0]));
-        FileDesk disk = new MemoryDisk();
+        FileDesk disk = new StoreDesk(folder);
         Platform.startup(() -> Platform.setImplicitExit(false));
         for (String example : disk.examples().subList(0, 2)) {
             for (boolean dark : new boolean[] {false, true}) {
@@ -76,7 +78,7 @@ public final class BenchShot {
         theme.darkProperty().set(dark);
         Desk desk = new Desk(new Session(disk.example(example).setUp()), Pulse.atOnce());
         desk.open(disk.example(example).setUp(), null, null);
-        BenchWindow window = new BenchWindow(desk, disk, NOBODY, theme);
+        BenchWindow window = new BenchWindow(desk, disk, NOBODY, theme, new DirectScheduler());
         Stage stage = new Stage();
         Scene scene = window.scene(size[0], size[1], theme);
         stage.setScene(scene);

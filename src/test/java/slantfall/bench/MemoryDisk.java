@@ -1,9 +1,7 @@
 package slantfall.bench;
 
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.EnumMap;
-import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -19,13 +17,14 @@ import slantfall.liquid.Property;
 import slantfall.liquid.Provision;
 import slantfall.liquid.Range;
 import slantfall.store.FileStamp;
+import slantfall.store.Preferences;
 
 /** Files in memory, with the faults a test wants. */
 public final class MemoryDisk implements FileDesk {
 
     public final Map<Path, SetUp> files = new LinkedHashMap<>();
-    public final Map<String, String> words = new HashMap<>();
-    public final List<Path> recent = new ArrayList<>();
+    public Preferences preferences = Preferences.initial();
+    public Preferences written;
     public Found kept;
     public RuntimeException fault;
     public boolean changedOutside;
@@ -121,17 +120,6 @@ public final class MemoryDisk implements FileDesk {
     }
 
     @Override
-    public List<Path> recent() {
-        return recent;
-    }
-
-    @Override
-    public void used(Path file) {
-        recent.remove(file);
-        recent.add(0, file);
-    }
-
-    @Override
     public void keep(SetUp setUp, Path file) {
         kept = new Found(setUp, file);
     }
@@ -147,12 +135,22 @@ public final class MemoryDisk implements FileDesk {
     }
 
     @Override
-    public Optional<String> remembered(String key) {
-        return Optional.ofNullable(words.get(key));
+    public Preferences preferences() {
+        return preferences;
     }
 
     @Override
-    public void remember(String key, String word) {
-        words.put(key, word);
+    public void prefer(Preferences wanted) {
+        preferences = wanted;
+    }
+
+    @Override
+    public void writePreferences() {
+        written = preferences;
+    }
+
+    @Override
+    public List<String> reports() {
+        return List.of();
     }
 }

@@ -101,7 +101,7 @@ final class EntryText {
 
     private Read unknown(double low, double high, List<String> typed) {
         boolean log = setting.scale() == Scale.LOG && low > 0;
-        double middle = log ? Math.sqrt(low * high) : (low + high) / 2;
+        double middle = log ? Math.sqrt(low) * Math.sqrt(high) : low + (high - low) / 2;
         Value value = new Value(middle, "", new Tolerance(Tolerance.Shape.UNKNOWN, low, high, typed));
         return new Read(value, unit,
                 "unknown between " + shown(low) + " and " + shown(high) + "; computed at " + shown(middle));

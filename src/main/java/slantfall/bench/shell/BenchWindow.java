@@ -24,6 +24,7 @@ import slantfall.bench.model.Desk;
 import slantfall.bench.plot.Pictures;
 import slantfall.declare.LiquidBase;
 import slantfall.declare.SetUp;
+import slantfall.session.Scheduler;
 
 /** The parts put together. */
 public final class BenchWindow extends StackPane {
@@ -40,10 +41,10 @@ public final class BenchWindow extends StackPane {
     private final NewPane newPane;
 
     /** A window on a desk. */
-    public BenchWindow(Desk desk, FileDesk disk, Chooser chooser, Theme theme) {
+    public BenchWindow(Desk desk, FileDesk disk, Chooser chooser, Theme theme, Scheduler work) {
         this.desk = desk;
         Notices notices = new Notices();
-        files = new FileLife(desk, disk, chooser, notices);
+        files = new FileLife(desk, disk, chooser, notices, work);
         railModel = new RailModel(desk);
         rail = new RailView(railModel, disk::presets);
         LedgerModel ledgerModel = new LedgerModel(desk);

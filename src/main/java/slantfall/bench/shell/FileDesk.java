@@ -6,6 +6,7 @@ import java.util.Optional;
 import slantfall.declare.SetUp;
 import slantfall.liquid.Preset;
 import slantfall.store.FileStamp;
+import slantfall.store.Preferences;
 
 /** Files as the window needs them. Every method that fails throws a message that says what to do. */
 public interface FileDesk {
@@ -27,10 +28,10 @@ public interface FileDesk {
     /** Reads a set-up. */
     Opened read(Path file);
 
-    /** Writes a set-up, atomically and with a backup. */
+    /** Writes a set-up over whatever the file holds, atomically and with a backup. */
     FileStamp write(SetUp setUp, Path file);
 
-    /** Whether the file is another than the one that the stamp was taken of. */
+    /** Whether the file holds something else than when the stamp was taken; one that is gone has changed. */
     boolean changed(Path file, FileStamp stamp);
 
     /** Names of the examples that come with the program. */
@@ -42,12 +43,6 @@ public interface FileDesk {
     /** Liquids that can be chosen. */
     List<Preset> presets();
 
-    /** Files used lately, the newest first. */
-    List<Path> recent();
-
-    /** Remembers a file as the newest used. */
-    void used(Path file);
-
     /** Keeps unsaved work beside the files, so that nothing is lost when the program dies. */
     void keep(SetUp setUp, Path file);
 
@@ -57,9 +52,15 @@ public interface FileDesk {
     /** Work that was kept and never saved. */
     Optional<Found> found();
 
-    /** A word remembered from the last time, such as the theme. */
-    Optional<String> remembered(String key);
+    /** What is remembered from one start to the next. */
+    Preferences preferences();
 
-    /** Remembers a word for the next time. */
-    void remember(String key, String word);
+    /** Takes it over; {@link #writePreferences} makes it last. */
+    void prefer(Preferences preferences);
+
+    /** Writes what is remembered. */
+    void writePreferences();
+
+    /** What was wrong with files of the user that nobody's work hangs on, one sentence each. */
+    List<String> reports();
 }

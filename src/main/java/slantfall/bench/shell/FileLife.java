@@ -10,8 +10,11 @@ import slantfall.catalogue.Catalogue;
 import slantfall.declare.LiquidBase;
 import slantfall.declare.SetUp;
 import slantfall.liquid.Preset;
+import slantfall.session.Scheduler;
 import slantfall.session.Session;
 import slantfall.store.FileStamp;
+import slantfall.store.Preferences;
+import slantfall.store.ProjectFile;
 
 /**
  * The life of a set-up on disk. Unsaved work is never dropped without the user's word, and is kept beside the files in
@@ -19,21 +22,28 @@ import slantfall.store.FileStamp;
  */
 public final class FileLife {
 
-    private static final String LAST = "last";
-    private static final String SUFFIX = ".slantfall.json";
+    private static final String KEEP = "keep";
+    private static final String PREFER = "prefer";
 
     private final Desk desk;
     private final FileDesk disk;
     private final Chooser chooser;
     private final Notices notices;
+    private final Scheduler work;
     private final Session session;
 
-    /** Files of a desk. */
-    public FileLife(Desk desk, FileDesk disk, Chooser chooser, Notices notices) {
+    /**
+     * Files of a desk.
+     *
+     * @param chooser asks for a file
+     * @param work keeps unsaved work without holding up the screen
+     */
+    public FileLife(Desk desk, FileDesk disk, Chooser chooser, Notices notices, Scheduler work) {
         this.desk = desk;
         this.disk = disk;
         this.chooser = chooser;
         this.notices = notices;
+        this.work = work;
         this.session = desk.session();
         session.listen(s -> keep());
     }
@@ -45,11 +55,14 @@ public final class FileLife {
             recover(found.get());
             return;
         }
-        Optional<Path> last = disk.remembered(LAST).filter(w -> !w.isBlank()).map(Path::of);
-        if (last.isPresent() && Files.isRegularFile(last.get()) && take(last.get())) {
-            return;
+        String last = disk.preferences().last();
+        boolean there = !last.isBlank() && Files.isRegularFile(Path.of(last));
+        if (!there || !take(Path.of(last))) {
+            disk.examples().stream().findFirst().ifPresent(this::example);
         }
-        disk.examples().stream().findFirst().ifPresent(this::example);
+        if (!disk.reports().isEmpty()) {
+            notices.say(String.join(" ", disk.reports()));
+        }
     }
 
     private void recover(FileDesk.Found found) {
@@ -71,7 +84,6 @@ public final class FileLife {
             Optional<Preset> water = disk.presets().stream().findFirst();
             LiquidBase base = water.map(LiquidBase::of).orElseGet(LiquidBase::measured);
             show(SetUp.blank(Catalogue.named(arrangement).key(), base), null, null);
-            disk.remember(LAST, "");
         });
     }
 
@@ -90,7 +102,6 @@ public final class FileLife {
         leave(() -> {
             FileDesk.Opened opened = disk.example(name);
             show(opened.setUp(), null, null);
-            disk.remember(LAST, "");
         });
     }
 
@@ -112,7 +123,7 @@ public final class FileLife {
     private void show(SetUp setUp, Path file, FileStamp stamp) {
         notices.dismiss();
         desk.open(setUp, file, stamp);
-        disk.forget();
+        keep();
     }
 
     /** Does something that replaces the set-up, after the user's word if there is unsaved work. */
@@ -128,7 +139,6 @@ public final class FileLife {
                     }
                 }),
                 new Answer("Leave them", () -> {
-                    disk.forget();
                     notices.dismiss();
                     next.run();
                 }),
@@ -159,14 +169,13 @@ public final class FileLife {
     public boolean saveAs() {
         String name = session.current().title().isBlank() ? session.arrangement().key() : session.current().title();
         String plain = name.strip().replaceAll("[^\\p{L}\\p{N}._ -]", "").replace(' ', '-');
-        return chooser.save(plain + SUFFIX).map(this::write).orElse(false);
+        return chooser.save(plain + ProjectFile.ENDING).map(this::write).orElse(false);
     }
 
     private boolean write(Path file) {
         try {
             FileStamp stamp = disk.write(session.current(), file);
             session.savedTo(file, stamp);
-            disk.forget();
             remember(file);
             notices.dismiss();
             return true;
@@ -177,8 +186,18 @@ public final class FileLife {
     }
 
     private void remember(Path file) {
-        disk.used(file);
-        disk.remember(LAST, file.toAbsolutePath().toString());
+        prefer(disk.preferences().opened(file));
+    }
+
+    /** Remembers something for the next start. */
+    public void prefer(Preferences preferences) {
+        disk.prefer(preferences);
+        behind(PREFER, disk::writePreferences);
+    }
+
+    /** What is remembered. */
+    public Preferences preferences() {
+        return disk.preferences();
     }
 
     /** Looks whether the file was changed by somebody else; called when the window comes to the front. */
@@ -198,7 +217,7 @@ public final class FileLife {
 
     /** Files used lately. */
     public List<Path> recent() {
-        return disk.recent();
+        return disk.preferences().recent().stream().map(Path::of).toList();
     }
 
     /** Examples that come with the program. */
@@ -206,16 +225,37 @@ public final class FileLife {
         return disk.examples();
     }
 
+    /** Keeps what is not saved, the newest only; while a drag runs the ones between are passed over. */
     private void keep() {
-        try {
-            if (session.dirty()) {
-                disk.keep(session.current(), session.file());
-            } else {
-                disk.forget();
-            }
-        } catch (RuntimeException e) {
-            notices.problem("Unsaved work cannot be kept: " + said(e));
+        if (session.dirty()) {
+            SetUp now = session.current();
+            Path file = session.file();
+            behind(KEEP, () -> disk.keep(now, file));
+        } else {
+            behind(KEEP, disk::forget);
         }
+    }
+
+    private void behind(String question, Runnable task) {
+        work.request(
+                question,
+                () -> {
+                    task.run();
+                    return "";
+                },
+                done -> { },
+                e -> notices.problem(said(e)));
+    }
+
+    /** The end: unsaved work is kept for the next start. */
+    public void end() {
+        work.close();
+        if (session.dirty()) {
+            disk.keep(session.current(), session.file());
+        } else {
+            disk.forget();
+        }
+        disk.writePreferences();
     }
 
     private static String said(RuntimeException e) {
