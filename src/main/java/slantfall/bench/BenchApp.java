@@ -4,6 +4,8 @@ import java.nio.file.Path;
 import java.util.List;
 import javafx.application.Application;
 import javafx.application.Platform;
+import javafx.geometry.Rectangle2D;
+import javafx.stage.Screen;
 import javafx.stage.Stage;
 import slantfall.bench.look.Theme;
 import slantfall.bench.model.Desk;
@@ -21,6 +23,8 @@ public final class BenchApp extends Application {
 
     private static final double WIDTH = 1440;
     private static final double HEIGHT = 900;
+    private static final double SMALLEST_WIDTH = 720;
+    private static final double SMALLEST_HEIGHT = 480;
     private static final String THEME = "theme";
     private static final String DARK = "dark";
 
@@ -45,9 +49,8 @@ public final class BenchApp extends Application {
                 files.look();
             }
         });
-        stage.setMinWidth(720);
-        stage.setMinHeight(480);
         stage.setScene(window.scene(WIDTH, HEIGHT, theme));
+        fit(stage);
         openFirst();
         stage.show();
     }
@@ -55,6 +58,15 @@ public final class BenchApp extends Application {
     @Override
     public void stop() {
         files.end();
+    }
+
+    /** As large as wished, where the screen has room for it. */
+    private static void fit(Stage stage) {
+        Rectangle2D room = Screen.getPrimary().getVisualBounds();
+        stage.setWidth(Math.min(WIDTH, room.getWidth()));
+        stage.setHeight(Math.min(HEIGHT, room.getHeight()));
+        stage.setMinWidth(SMALLEST_WIDTH);
+        stage.setMinHeight(SMALLEST_HEIGHT);
     }
 
     private void openFirst() {

@@ -1,6 +1,7 @@
 package slantfall.bench.form;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.Optional;
 import javafx.beans.property.DoubleProperty;
 import javafx.beans.property.ObjectProperty;
@@ -29,7 +30,11 @@ import slantfall.quantity.Unit;
  */
 public final class FieldModel {
 
+    /** Digits of a number that somebody gave. */
     private static final int DIGITS = 6;
+
+    /** Digits of a number that a correlation gave: as many as it can be trusted for. */
+    private static final int CORRELATED_DIGITS = 4;
 
     private final Desk desk;
     private final Setting setting;
@@ -131,7 +136,7 @@ public final class FieldModel {
         si = given != null ? given.si() : property != null
                 ? row.map(LiquidReport.Row::value).orElse(Double.NaN)
                 : assessment.setUp().value(setting);
-        unit.set(desk.unit(setting, Double.isNaN(si) ? setting.initial() : si));
+        unit.set(desk.unit(setting, Double.isNaN(si) || si == 0 ? setting.usual().high() : si));
         standing.set(standing(given, row));
         badge.set(badgeText());
         origin.set(row.map(LiquidReport.Row::origin).orElse(""));
@@ -159,8 +164,11 @@ public final class FieldModel {
     }
 
     private String rangeEcho(Value given) {
-        if (given == null || given.tolerance().isEmpty()) {
+        if (given == null) {
             return "";
+        }
+        if (given.tolerance().isEmpty()) {
+            return typedOtherwise(given) ? "typed as " + given.typed() : "";
         }
         Tolerance t = given.known();
         String between = Show.value(t.low(), setting.kind(), unit.get(), 3) + " to "
@@ -168,6 +176,14 @@ public final class FieldModel {
         return t.shape() == Tolerance.Shape.UNKNOWN
                 ? "unknown: " + between + "; computed at " + Show.value(si, setting.kind(), unit.get(), 3)
                 : between;
+    }
+
+    /** Whether the user typed it in another way than it is shown in. */
+    private boolean typedOtherwise(Value given) {
+        String typed = given.typed().strip();
+        boolean bare = setting.kind().dimensionless() && !typed.endsWith("%");
+        return !typed.isEmpty() && !bare && !typed.endsWith(" " + unit.get().symbol())
+                && !typed.endsWith(" " + unit.get().label());
     }
 
     private Standing standing(Value given, Optional<LiquidReport.Row> row) {
@@ -202,7 +218,9 @@ public final class FieldModel {
 
     private String number(double value) {
         return Nudge.text(new BigDecimal(unit.get().fromSi(value))
-                .round(new java.math.MathContext(DIGITS)));
+                .round(new MathContext(property != null && standing.get() != Standing.MEASURED
+                        ? CORRELATED_DIGITS
+                        : DIGITS)));
     }
 
     /** Makes what was typed the value; a wrong entry stays, with the reason. */

@@ -5,7 +5,7 @@ import java.util.List;
 import javafx.geometry.Pos;
 import javafx.scene.AccessibleAttribute;
 import javafx.scene.Node;
-import javafx.scene.control.Hyperlink;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.Menu;
 import javafx.scene.control.MenuButton;
@@ -35,7 +35,7 @@ final class FieldView extends VBox {
     private final Slider slider = new Slider(0, 1, 0);
     private final TextField field = new TextField();
     private final MenuButton unit = new MenuButton();
-    private final Hyperlink back = new Hyperlink("give back");
+    private final Button back = new Button("↺");
     private final Label badge = Parts.label("", Mark.BADGE);
     private Object gesture;
     private boolean showing;
@@ -79,7 +79,9 @@ final class FieldView extends VBox {
         from.setMaxWidth(360);
         badge.setTooltip(from);
         back.setOnAction(e -> model.release());
+        back.getStyleClass().addAll("flat", "back");
         back.setAccessibleText("Give " + model.setting().name() + " back to its default or correlation");
+        back.setTooltip(new Tooltip("Back to its default or correlation"));
         HBox head = new HBox(5, name, Parts.symbol(model.setting().symbol()), Parts.spring(), badge, back);
         head.setAlignment(Pos.BASELINE_LEFT);
         return head;

@@ -14,15 +14,16 @@ import slantfall.declare.Verdict;
 /** How rows of the ledger look. */
 final class Rows {
 
-    private static final double NUMBER = 78;
-    private static final double UNIT = 62;
-    private static final double VERDICT = 72;
+    private static final double NUMBER = 74;
+    private static final double UNIT = 58;
+    private static final double VERDICT = 80;
 
     private Rows() {}
 
     static HBox reading(ReadingRow row) {
         Label name = Parts.label(row.reading().name(), Mark.NAME);
         name.setMinWidth(40);
+        name.setWrapText(true);
         HBox.setHgrow(name, Priority.SOMETIMES);
         Label number = fixed(row.numberProperty(), NUMBER, Pos.CENTER_RIGHT, Mark.VALUE);
         number.setId("reading-" + row.reading().key());
@@ -63,7 +64,9 @@ final class Rows {
         HBox first = new HBox(6, verdict(row.verdictProperty()), name, Parts.spring(), margin);
         first.setAlignment(Pos.BASELINE_LEFT);
         Label compared = Parts.line(row.comparedProperty(), "compared");
-        VBox box = new VBox(1, first, compared, Parts.line(row.noteProperty(), Mark.MUTED));
+        VBox below = new VBox(1, compared, Parts.line(row.noteProperty(), Mark.MUTED));
+        below.getStyleClass().add("below-verdict");
+        VBox box = new VBox(1, first, below);
         box.getStyleClass().add(Mark.ROW);
         Runnable speak = () -> box.setAccessibleText(row.nameProperty().get() + ": "
                 + row.verdictProperty().get().word() + ", " + row.comparedProperty().get() + ", "
@@ -80,7 +83,9 @@ final class Rows {
         first.setAlignment(Pos.BASELINE_LEFT);
         Label phrase = Parts.line(row.phraseProperty(), "phrase");
         Label margin = Parts.line(row.marginProperty(), "margin");
-        VBox box = new VBox(1, first, phrase, margin);
+        VBox below = new VBox(1, phrase, margin);
+        below.getStyleClass().add("below-verdict");
+        VBox box = new VBox(1, first, below);
         box.getStyleClass().add(Mark.ROW);
         Runnable speak = () -> box.setAccessibleText(row.panel().question() + " " + row.phraseProperty().get() + ", "
                 + row.marginProperty().get() + ". Opens the authors.");

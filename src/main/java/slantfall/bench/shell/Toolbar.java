@@ -16,7 +16,7 @@ import javafx.scene.control.ToggleGroup;
 import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.layout.HBox;
-import slantfall.bench.look.Parts;
+import javafx.scene.layout.Priority;
 import slantfall.bench.look.Theme;
 import slantfall.bench.model.Desk;
 import slantfall.quantity.UnitSystem;
@@ -46,7 +46,6 @@ final class Toolbar extends HBox {
                 undo(),
                 redo(),
                 title(),
-                Parts.spring(),
                 units(),
                 dark(theme),
                 button("Find", "find", "Ctrl+F", actions.find()));
@@ -122,7 +121,9 @@ final class Toolbar extends HBox {
         title.setId("title");
         title.setPromptText("Name of this set-up");
         title.setAccessibleText("Name of this set-up");
-        title.setPrefColumnCount(22);
+        title.setMaxWidth(Double.MAX_VALUE);
+        title.setMinWidth(60);
+        HBox.setHgrow(title, Priority.ALWAYS);
         title.getStyleClass().add("title-field");
         desk.follow(a -> {
             if (!title.isFocused()) {
