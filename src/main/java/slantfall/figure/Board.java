@@ -73,7 +73,7 @@ public final class Board {
             Profile courses = scene.assessment().profiles().courses();
             boolean course = !courses.columns().isEmpty() && area.h() > 430;
             double layoutHeight = area.h() * (course ? 0.3 : 0.38);
-            double courseHeight = course ? Math.min(150, 0.24 * area.h()) : 0;
+            double courseHeight = course ? Math.min(160, 0.25 * area.h()) : 0;
             Rect top = new Rect(area.x(), area.y() + TITLE, area.w(), layoutHeight - TITLE);
             Rect middle = new Rect(
                     area.x(), area.y() + layoutHeight + TITLE, area.w(), area.h() - layoutHeight - courseHeight - TITLE);
@@ -90,7 +90,7 @@ public final class Board {
 
         private Drawn middle(Rect middle, List<Handle> handles) {
             double split = middle.x() + 0.47 * middle.w();
-            Rect close = new Rect(middle.x() + 52, middle.y() + 16, split - middle.x() - 62, middle.h() - 52);
+            Rect close = new Rect(middle.x() + 52, middle.y() + 16, split - middle.x() - 62, middle.h() - 56);
             Span up = scene.holds().hold("wall", CloseUpFigure.wanted(strip));
             title("Close-up", middle.x() + 8, middle.y() + 2);
             handles.addAll(new CloseUpFigure(scene, strip, close, up).draw(pen));

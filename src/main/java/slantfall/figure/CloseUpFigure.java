@@ -30,7 +30,7 @@ final class CloseUpFigure {
 
     /** The stretch of the wall-normal axis that the liquid wants. */
     static Span wanted(Strip strip) {
-        return Span.around(0, strip.filled() ? 1.12 * strip.deepest() : 1e-3);
+        return Span.around(0, strip.filled() ? 1.2 * strip.deepest() : 1e-3);
     }
 
     List<Handle> draw(Pen pen) {
@@ -143,11 +143,11 @@ final class CloseUpFigure {
         if (!(largest > 0)) {
             return;
         }
-        stress(pen, "τ_w ", lower, largest, frame.y(0) - 7, frame.y(0) - 12);
+        stress(pen, "on the wall ", lower, largest, frame.y(0) - 7, frame.y(0) - 12);
         if (!Double.isNaN(upper)) {
             // On a wall above, the liquid's drag is the negative of μ du/dy; on a surface the gas drags the liquid.
             double seen = strip.upper().wall() ? -upper : upper;
-            stress(pen, strip.upper().wall() ? "τ_2 " : "τ_i ", seen, largest, top(0.88) + 7, top(0.88) + 22);
+            stress(pen, strip.upper().wall() ? "on the wall " : "gas drag ", seen, largest, top(0.88) + 7, top(0.88) + 22);
         }
         double speed = strip.upper().speed();
         if (speed != 0) {

@@ -29,7 +29,7 @@ final class CourseFigure {
             largest = Math.max(largest, v);
         }
         Span up = scene.holds().hold("course." + column.key(), stretch(column.kind(), least, largest));
-        Rect own = area.inset(58, 8, 10, 34);
+        Rect own = area.inset(58, 8, 28, 38);
         Frame frame = new Frame(own, new Span(0, x[x.length - 1]), up);
         Unit unit = Display.unit(column.kind(), scene.units(), up.high());
         frame.drawUp(pen, unit, column.name());

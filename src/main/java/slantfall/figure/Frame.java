@@ -31,20 +31,20 @@ record Frame(Rect area, Span across, Span up) {
 
     /** Grid lines and labels of the horizontal axis, with its name below. */
     void drawAcross(Pen pen, Unit unit, String name) {
-        Ticks ticks = Ticks.of(unit.fromSi(across.low()), unit.fromSi(across.high()), (int) Math.max(2, area.w() / 55));
+        Ticks ticks = Ticks.of(unit.fromSi(across.low()), unit.fromSi(across.high()), (int) Math.max(3, area.w() / 48));
         Lettering small = Lettering.of(Ink.FAINT, 0);
         for (int i = 0; i < ticks.count(); i++) {
             double px = x(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), px, area.y(), px, area.bottom());
-            pen.text(small, ticks.label(i), px, area.bottom() + 13);
+            pen.text(small, ticks.label(i), px, area.bottom() + 17);
         }
         pen.line(Stroke.of(Ink.AXIS, 1), area.x(), area.bottom(), area.right(), area.bottom());
-        pen.text(Lettering.of(Ink.TEXT, 0), fit(pen, name + ", " + unit.label(), area.w() + 20), area.midX(), area.bottom() + 27);
+        pen.text(Lettering.of(Ink.TEXT, 0), fit(pen, name + ", " + unit.label(), area.w() + 20), area.midX(), area.bottom() + 31);
     }
 
     /** Grid lines of the vertical axis, and its labels on the left if there is room for them. */
     void drawUp(Pen pen, Unit unit, String name) {
-        Ticks ticks = Ticks.of(unit.fromSi(up.low()), unit.fromSi(up.high()), (int) Math.max(2, area.h() / 34));
+        Ticks ticks = Ticks.of(unit.fromSi(up.low()), unit.fromSi(up.high()), (int) Math.max(3, area.h() / 30));
         for (int i = 0; i < ticks.count(); i++) {
             double py = y(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), area.x(), py, area.right(), py);

@@ -35,11 +35,13 @@ final class LayoutFigure {
     }
 
     private void place(Rect area) {
-        boolean both = strip.grips().anyAngle();
-        double radius = Math.max(20, Math.min(area.w() - 3 * PAD, (both ? area.h() / 2 : area.h()) - 1.6 * PAD));
+        Span side = scene.holds().hold("layout.side", strip.angle() < 0 ? new Span(-1, 0) : new Span(0, 1));
+        boolean both = side.low() < 0 && side.high() > 0;
+        double tall = (both ? area.h() / 2 : area.h()) - 1.8 * PAD;
+        double radius = Math.max(20, Math.min(area.w() - 3 * PAD, tall));
         double room = (area.w() - radius - 3 * PAD) / 2;
         pivotX = area.right() - PAD - Math.max(0, room);
-        pivotY = both ? area.midY() : area.bottom() - PAD;
+        pivotY = both ? area.midY() : side.low() < 0 ? area.y() + 0.7 * PAD : area.bottom() - 1.1 * PAD;
         scale = radius / scene.holds().hold("layout.length", new Span(0, strip.length())).high();
     }
 
@@ -84,7 +86,7 @@ final class LayoutFigure {
         if (thin && strip.filled()) {
             String what = strip.upper().wall() ? "gap" : "film";
             String note = what + " " + Show.value(strip.deepest(), Kind.LENGTH, scene.units(), 3) + ", drawn wider to be seen";
-            pen.text(Lettering.of(Ink.FAINT, -1), note, Math.min(px(up, 0), pivotX - 120) - 6, pivotY + 14 + 14);
+            pen.text(Lettering.of(Ink.FAINT, -1), note, Math.min(px(up, 0), pivotX - 120) - 6, pivotY + 26);
         }
     }
 

@@ -52,7 +52,7 @@ final class TraverseFigure {
         if (!known) {
             pen.line(Stroke.of(Ink.AXIS, 1), own.x(), own.bottom(), own.right(), own.bottom());
             pen.text(Lettering.of(Ink.FAINT, 0), "unknown", own.midX(), own.midY());
-            pen.text(Lettering.of(Ink.TEXT, 0), column.name(), own.midX(), own.bottom() + 27);
+            pen.text(Lettering.of(Ink.TEXT, 0), column.name(), own.midX(), own.bottom() + 31);
             return;
         }
         frame.drawAcross(pen, unit, column.name());
