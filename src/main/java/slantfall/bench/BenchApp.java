@@ -1,0 +1,68 @@
+package slantfall.bench;
+
+import java.nio.file.Path;
+import java.util.List;
+import javafx.application.Application;
+import javafx.application.Platform;
+import javafx.stage.Stage;
+import slantfall.bench.look.Theme;
+import slantfall.bench.model.Desk;
+import slantfall.bench.model.FramePulse;
+import slantfall.bench.shell.BenchWindow;
+import slantfall.bench.shell.FileDesk;
+import slantfall.bench.shell.FileLife;
+import slantfall.bench.shell.StageChooser;
+import slantfall.bench.shell.StoreDesk;
+import slantfall.session.BackgroundScheduler;
+import slantfall.session.Session;
+
+/** The window as an application of the toolkit. */
+public final class BenchApp extends Application {
+
+    private static final double WIDTH = 1440;
+    private static final double HEIGHT = 900;
+    private static final String THEME = "theme";
+    private static final String DARK = "dark";
+
+    private FileLife files;
+
+    @Override
+    public void start(Stage stage) {
+        FileDesk disk = StoreDesk.ofUser();
+        Theme theme = new Theme();
+        theme.darkProperty().set(DARK.equals(disk.preferences().theme()));
+        Desk desk = new Desk(new Session(disk.example(disk.examples().get(0)).setUp()), new FramePulse());
+        desk.unitsProperty().set(disk.preferences().units());
+        BenchWindow window = new BenchWindow(
+                desk, disk, new StageChooser(stage), theme, new BackgroundScheduler(Platform::runLater));
+        files = window.files();
+        theme.darkProperty().addListener((o, a, dark) ->
+                files.prefer(files.preferences().with(THEME, dark ? DARK : "light")));
+        desk.unitsProperty().addListener((o, a, units) -> files.prefer(files.preferences().in(units)));
+        stage.titleProperty().bind(desk.titleProperty());
+        stage.focusedProperty().addListener((o, a, focused) -> {
+            if (focused) {
+                files.look();
+            }
+        });
+        stage.setMinWidth(720);
+        stage.setMinHeight(480);
+        stage.setScene(window.scene(WIDTH, HEIGHT, theme));
+        openFirst();
+        stage.show();
+    }
+
+    @Override
+    public void stop() {
+        files.end();
+    }
+
+    private void openFirst() {
+        List<String> named = getParameters().getUnnamed();
+        if (named.isEmpty()) {
+            files.start();
+        } else {
+            files.open(Path.of(named.get(0)));
+        }
+    }
+}

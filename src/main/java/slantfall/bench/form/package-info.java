@@ -1,0 +1,2 @@
+/** The settings rail, generated from the declaration: sliders, typed fields, choices, liquid, limits. */
+package slantfall.bench.form;

@@ -1,0 +1,55 @@
+package slantfall.bench.look;
+
+import javafx.beans.value.ObservableValue;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+
+/** Small pieces that every part is made of. */
+public final class Parts {
+
+    private Parts() {}
+
+    /** A label of some style classes. */
+    public static Label label(String text, String... styles) {
+        Label label = new Label(text);
+        label.getStyleClass().addAll(styles);
+        return label;
+    }
+
+    /** A label that wraps and takes no room while it is empty. */
+    public static Label line(ObservableValue<String> text, String... styles) {
+        Label label = label("", styles);
+        label.setWrapText(true);
+        label.setMaxWidth(Double.MAX_VALUE);
+        label.textProperty().bind(text);
+        label.managedProperty().bind(label.textProperty().isNotEmpty());
+        label.visibleProperty().bind(label.managedProperty());
+        return label;
+    }
+
+    /** Takes the room that is left in a row. */
+    public static Node spring() {
+        Region spring = new Region();
+        HBox.setHgrow(spring, Priority.ALWAYS);
+        return spring;
+    }
+
+    /** A symbol such as τ_w set with its subscript lowered. */
+    public static HBox symbol(String symbol) {
+        HBox box = new HBox();
+        box.getStyleClass().add(Mark.SYMBOL);
+        int cut = symbol.indexOf('_');
+        Label base = label(cut < 0 ? symbol : symbol.substring(0, cut), "symbol-base");
+        box.getChildren().add(base);
+        if (cut >= 0) {
+            Label sub = label(symbol.substring(cut + 1), "symbol-sub");
+            sub.setTranslateY(3);
+            box.getChildren().add(sub);
+        }
+        box.setMinWidth(Region.USE_PREF_SIZE);
+        return box;
+    }
+}

@@ -1,0 +1,2 @@
+/** The window: opens, and hands over to the shell. The only home of JavaFX. */
+package slantfall.bench;
