@@ -167,4 +167,20 @@ class SaveTest {
         assertThat(stamp.size()).isEqualTo(ProjectFile.write(first).length());
         assertThat(stamp.sha256()).matches("[0-9a-f]{64}");
     }
+
+    @Test
+    void whatAKilledProgramLeftIsSweptAway() throws IOException {
+        Path old = Files.writeString(folder.resolve(".plant.slantfall.json.1a2b.tmp"), "half");
+        Path oldBackup = Files.writeString(folder.resolve(".plant.slantfall.json~.1a2b.tmp"), "half");
+        Path young = Files.writeString(folder.resolve(".plant.slantfall.json.3c4d.tmp"), "half");
+        Path other = Files.writeString(folder.resolve(".other.slantfall.json.1a2b.tmp"), "half");
+        for (Path p : List.of(old, oldBackup, other)) {
+            Files.setLastModifiedTime(p, java.nio.file.attribute.FileTime.fromMillis(1));
+        }
+        ProjectFile.save(file, first);
+        assertThat(old).doesNotExist();
+        assertThat(oldBackup).doesNotExist();
+        assertThat(young).exists();
+        assertThat(other).exists();
+    }
 }
