@@ -1,5 +1,6 @@
 package slantfall.store;
 
+import java.io.File;
 import java.io.IOException;
 import java.nio.channels.FileChannel;
 import java.nio.file.AccessDeniedException;
@@ -18,6 +19,11 @@ final class AtomicFile {
 
     private static final boolean WINDOWS =
             System.getProperty("os.name", "").startsWith("Windows");
+
+    /** How the name of a new file ends: after the file's own, or its backup's. */
+    private static final String FRESH = "~?\\.[0-9a-f]{1,16}\\.tmp";
+
+    private static final long LEFT_BEHIND = 10 * 60 * 1000L;
 
     private final Disk disk;
 
@@ -45,6 +51,7 @@ final class AtomicFile {
             if (Files.exists(target) && !Files.isWritable(target)) {
                 throw new AccessDeniedException(path.toString());
             }
+            sweep(target);
             if (backup && Files.exists(target)) {
                 replace(target.resolveSibling(TextFile.name(target) + "~"), Files.readAllBytes(target), target);
             }
@@ -71,6 +78,20 @@ final class AtomicFile {
         }
         if (!Files.exists(folder)) {
             throw new StoreProblem(place, "the folder " + folder + " is missing", "Make it first, or save elsewhere");
+        }
+    }
+
+    // What a program that was killed while writing left behind; younger ones may be somebody's at work.
+    private static void sweep(Path target) {
+        String prefix = "." + TextFile.name(target);
+        long old = System.currentTimeMillis() - LEFT_BEHIND;
+        File[] left = TextFile.folder(target)
+                .toFile()
+                .listFiles(f -> f.getName().startsWith(prefix)
+                        && f.getName().substring(prefix.length()).matches(FRESH)
+                        && f.lastModified() < old);
+        for (File file : left == null ? new File[0] : left) {
+            file.delete();
         }
     }
 

@@ -21,8 +21,8 @@ final class Kept {
         keep(node);
         List<String> parts = Pointers.parts(node.place().pointer());
         String near = Entries.nearest(known, parts.get(parts.size() - 1));
-        report("unknown key " + node.place().key() + " was kept (line " + node.place().line() + ", column "
-                + node.place().column() + ")" + (near.startsWith(SUGGESTION) ? near : ""));
+        Place place = node.keyPlace();
+        report("unknown key " + place.key() + " was kept (line " + place.line() + ", column " + place.column() + ")" + (near.startsWith(SUGGESTION) ? near : ""));
     }
 
     /** Keeps a value without a word. */

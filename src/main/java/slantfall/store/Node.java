@@ -39,11 +39,24 @@ final class Node {
     private final Place place;
     private final Map<String, Node> members = new LinkedHashMap<>();
     private final List<Node> items = new ArrayList<>();
+    private Place keyPlace;
 
     Node(Sort sort, String text, Place place) {
         this.sort = sort;
         this.text = text;
         this.place = place;
+        this.keyPlace = place;
+    }
+
+    /** Notes where the key of this member stands. */
+    Node keyedAt(Place at) {
+        keyPlace = at;
+        return this;
+    }
+
+    /** Where the key of this member stands; the place of the value itself if it has none. */
+    Place keyPlace() {
+        return keyPlace;
     }
 
     /** An empty object. */

@@ -86,11 +86,11 @@ final class NodeReader {
             Place place = here(Pointers.child(object.place().pointer(), name));
             Node former = object.get(name);
             if (former != null) {
-                throw new StoreProblem(place, "the key stands twice, first in line " + former.place().line(),
+                throw new StoreProblem(place, "the key stands twice, first in line " + former.keyPlace().line(),
                         "Delete or rename one of the two");
             }
             parser.nextToken();
-            object.put(name, value(place.pointer()));
+            object.put(name, value(place.pointer()).keyedAt(place));
         }
         return object;
     }

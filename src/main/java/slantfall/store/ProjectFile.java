@@ -71,7 +71,7 @@ public final class ProjectFile {
      * @throws StoreProblem if it cannot be written; the former content is then untouched
      */
     public static FileStamp save(Path path, SetUp setUp) {
-        return save(path, setUp, AtomicFile.real());
+        return saveThrough(path, setUp, AtomicFile.real());
     }
 
     /**
@@ -95,7 +95,7 @@ public final class ProjectFile {
     }
 
     /** Writes through the given way to the disk. */
-    static FileStamp save(Path path, SetUp setUp, AtomicFile file) {
+    static FileStamp saveThrough(Path path, SetUp setUp, AtomicFile file) {
         byte[] content = write(setUp).getBytes(StandardCharsets.UTF_8);
         file.write(path, content, true);
         return FileStamp.of(path, content);
