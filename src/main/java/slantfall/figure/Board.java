@@ -5,6 +5,8 @@ import java.util.List;
 import java.util.Optional;
 import slantfall.declare.Profile;
 import slantfall.figure.Pen.Lettering;
+import slantfall.quantity.Kind;
+import slantfall.quantity.Show;
 
 /**
  * The middle of the bench in one picture: the layout at true scale, the close-up with its traverses on the same wall-normal
@@ -33,6 +35,15 @@ public final class Board {
     /** A small layout alone, for choosing an arrangement. */
     public static void card(Pen pen, Rect area, Scene scene) {
         Drawings.strip(scene).ifPresent(s -> new LayoutFigure(scene, s).draw(pen, area.inset(4, 4, 4, 4)));
+    }
+
+    /** The picture in words, for readers who cannot see it. */
+    public static String words(Scene scene) {
+        return Drawings.strip(scene)
+                .map(s -> scene.assessment().declaration().name() + " at " + Show.value(s.angle(), Kind.ANGLE, scene.units(), 3)
+                        + ", thickness " + Show.value(s.inletDepth(), Kind.LENGTH, scene.units(), 3) + "; "
+                        + new TraverseFigure(scene, new Span(0, 1)).words())
+                .orElse("no drawing");
     }
 
     /**
