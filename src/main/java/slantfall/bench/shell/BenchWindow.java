@@ -49,7 +49,7 @@ public final class BenchWindow extends StackPane {
         rail = new RailView(railModel, disk::presets);
         LedgerModel ledgerModel = new LedgerModel(desk);
         ledger = new LedgerView(desk, ledgerModel);
-        pictures = new Pictures(desk);
+        pictures = new Pictures(desk, theme);
         columns = new Columns(rail, pictures, ledger,
                 layout -> ledgerModel.briefProperty().set(layout == Columns.Layout.TWO_COLUMNS));
         finder = new FinderView(new FinderModel(desk), this::go);
