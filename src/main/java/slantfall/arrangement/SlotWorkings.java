@@ -173,11 +173,11 @@ final class SlotWorkings {
         double gap = p.flow() >= 0 ? shape.inlet() : shape.outlet();
         return flow()
                 .with("Q", p.flow(), Kind.VOLUME_FLOW)
-                .with("b", gap, Kind.LENGTH)
+                .with("b_e", gap, Kind.LENGTH)
                 .with("W", in.width(), Kind.LENGTH)
                 .with("ρ", p.density(), Kind.DENSITY)
                 .with("K_∞", RectangularDuct.entryLossNumber(gap / in.width()), Kind.RATIO)
-                .gives(new Names("Entry loss", "Δp_e", Kind.PRESSURE_DIFFERENCE), "(1 + K_∞) ρ (Q/(W b))²/2", p.entryLoss(),
+                .gives(new Names("Entry loss", "Δp_e", Kind.PRESSURE_DIFFERENCE), "(1 + K_∞) ρ (Q/(W b_e))²/2, b_e the gap at the mouth", p.entryLoss(),
                         LOSS, "laminar, flat inlet profile, the slot longer than the entry length");
     }
 

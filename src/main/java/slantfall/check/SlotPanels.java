@@ -14,7 +14,7 @@ import slantfall.source.Source;
 public final class SlotPanels {
 
     /** Side walls may take this share before the wide-slot profile is doubtful. */
-    private static final double WIDE = 0.95;
+    private static final double WIDE = 0.05;
 
     /** Steepest taper for lubrication theory. */
     private static final double SLOW = 0.1;
@@ -71,12 +71,12 @@ public final class SlotPanels {
                     c -> SlotEntry.durst(c.reynolds()) * 2 * c.gapInlet()),
             new Criterion<>(
                     CheckInfo.log(
-                            new CheckInfo.Criterion("wide-slot", "side-wall-factor", "Share left by the side walls",
-                                    "F ≥ 0.95", "laminar flow, any aspect"),
+                            new CheckInfo.Criterion("wide-slot", "side-wall-share", "Share taken by the side walls",
+                                    "1 − F ≤ 0.05", "laminar flow, any aspect"),
                             Kind.RATIO,
-                            Side.AT_LEAST,
+                            Side.AT_MOST,
                             PRACTICE),
-                    SlotCase::sideWallFactor,
+                    c -> 1 - c.sideWallFactor(),
                     c -> WIDE,
                     c -> true),
             new Criterion<>(

@@ -14,6 +14,8 @@ import slantfall.declare.Notice;
 import slantfall.declare.PanelResult;
 import slantfall.declare.Profile;
 import slantfall.declare.Setting;
+import slantfall.declare.Tolerance;
+import slantfall.declare.Value;
 import slantfall.declare.Working;
 import slantfall.quantity.Kind;
 import slantfall.quantity.Show;
@@ -64,9 +66,7 @@ final class AssessmentText {
         Table table = new Table();
         for (Setting s : a.declaration().coordinates()) {
             double value = a.setUp().value(s);
-            String typed = a.setUp().values().containsKey(s.key()) ? a.setUp().values().get(s.key()).typed() : null;
-            String origin = typed == null ? "untouched default" : typed.isEmpty() ? "" : "from " + typed;
-            table.row(s.name(), s.symbol(), show(value, s.kind()), origin);
+            table.row(s.name(), s.symbol(), show(value, s.kind()), origin(a.setUp().values().get(s.key())));
         }
         a.declaration().choices().forEach(c -> {
             String key = a.setUp().structure().choice(c);
@@ -74,6 +74,18 @@ final class AssessmentText {
             table.row(c.name(), "", name, a.setUp().choices().containsKey(c.key()) ? "" : "untouched default");
         });
         table.print(out, "  ");
+    }
+
+    private static String origin(Value given) {
+        if (given == null) {
+            return "untouched default";
+        }
+        String typed = given.typed().isEmpty() ? "" : "from " + given.typed();
+        List<String> known = given.tolerance().map(Tolerance::typed).orElse(List.of());
+        if (known.isEmpty()) {
+            return typed;
+        }
+        return known.size() == 1 ? typed + " ± " + known.get(0) : "unknown, within " + String.join(" to ", known);
     }
 
     private void liquid(Assessment a) {

@@ -1,10 +1,13 @@
 package slantfall.declare;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.Collectors;
 import slantfall.liquid.Liquid;
 import slantfall.liquid.LiquidState;
+import slantfall.liquid.Property;
 import slantfall.quantity.Show;
 import slantfall.quantity.UnitSystem;
 
@@ -96,6 +99,7 @@ public final class Assessor {
         for (String text : liquid.notices(state)) {
             notice("liquid", text);
         }
+        noticeMissing();
         for (int i = 0; i < declaration.readings().size(); i++) {
             Reading reading = declaration.readings().get(i);
             boolean explained = notices.stream().anyMatch(n -> n.about().equals(reading.key()));
@@ -115,7 +119,7 @@ public final class Assessor {
                 readings,
                 all,
                 panels(all),
-                LiquidReport.of(liquid, setUp.liquidState()),
+                LiquidReport.of(setUp),
                 profiles,
                 workings,
                 cautions,
@@ -136,6 +140,16 @@ public final class Assessor {
             panels.add(PanelResult.of(panel, own, house));
         }
         return panels;
+    }
+
+    private void noticeMissing() {
+        String missing = Arrays.stream(Property.values())
+                .filter(p -> declaration.uses().contains(p) && liquid.provision(p).isEmpty())
+                .map(p -> p.words() + " (" + Declaration.LIQUID + p.key() + ")")
+                .collect(Collectors.joining(", "));
+        if (!missing.isEmpty()) {
+            notice("liquid", "Not known of this liquid: " + missing + ". Give a measured value; what needs it is unknown.");
+        }
     }
 
     private void noticeUnusual() {

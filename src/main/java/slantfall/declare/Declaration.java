@@ -21,6 +21,7 @@ import slantfall.liquid.Property;
  * @param panels questions that the checks answer
  * @param checks criteria, in the order of the evaluator's margins
  * @param essentials keys of at most four settings that a new set-up is asked for
+ * @param uses properties of the liquid that some reading or check needs
  */
 public record Declaration(
         String key,
@@ -32,7 +33,8 @@ public record Declaration(
         List<Reading> readings,
         List<Panel> panels,
         List<CheckInfo> checks,
-        List<String> essentials) {
+        List<String> essentials,
+        Set<Property> uses) {
 
     /** Prefix of the liquid's own numbers. */
     public static final String LIQUID = "liquid.";
@@ -45,6 +47,7 @@ public record Declaration(
         panels = List.copyOf(panels);
         checks = List.copyOf(checks);
         essentials = List.copyOf(essentials);
+        uses = Set.copyOf(uses);
     }
 
     /** The words and lists of an arrangement, completed with the numbers of a liquid. */
@@ -63,7 +66,8 @@ public record Declaration(
                 face.readings(),
                 face.panels(),
                 face.checks(),
-                face.essentials());
+                face.essentials(),
+                face.uses());
     }
 
     /** Inputs of the evaluator in order: the settings that the assessment uses, then the liquid's own numbers. */

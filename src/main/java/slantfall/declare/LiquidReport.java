@@ -29,15 +29,24 @@ public record LiquidReport(String name, double temperature, double strength, Lis
      */
     public record Row(Property property, double value, String origin) {}
 
-    /** Reads a state into rows. */
-    public static LiquidReport of(Liquid liquid, LiquidState state) {
+    /** Reads the liquid of a set-up into rows. */
+    static LiquidReport of(SetUp setUp) {
+        Liquid liquid = setUp.liquid();
+        LiquidState state = setUp.liquidState();
         List<Row> rows = new ArrayList<>();
         for (Property property : Property.values()) {
             double value = state.get(property);
             if (!Double.isNaN(value)) {
-                rows.add(new Row(property, value, liquid.origin(property)));
+                rows.add(new Row(property, value, origin(setUp, liquid, property)));
             }
         }
         return new LiquidReport(liquid.name(), state.temperature, state.strength, rows);
+    }
+
+    private static String origin(SetUp setUp, Liquid liquid, Property property) {
+        Value given = setUp.values().get(Declaration.LIQUID + property.key());
+        boolean open = given != null
+                && given.tolerance().filter(t -> t.shape() == Tolerance.Shape.UNKNOWN).isPresent();
+        return open ? "unknown, taken within " + String.join(" to ", given.known().typed()) : liquid.origin(property);
     }
 }

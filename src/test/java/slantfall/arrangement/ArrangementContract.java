@@ -70,12 +70,13 @@ abstract class ArrangementContract {
                 double[] out = evaluate(setUp, d);
                 Assessment a = arrangement().assess(setUp);
                 for (int i = 0; i < d.readings().size(); i++) {
-                    assertThat(a.readings().get(i).value()).isEqualTo(out[i]);
+                    assertThat(Double.valueOf(a.readings().get(i).value())).isEqualTo(Double.valueOf(out[i]));
                 }
                 for (int i = 0; i < d.checks().size(); i++) {
                     CheckResult check = a.check(d.checks().get(i).key()).orElseThrow();
-                    assertThat(check.margin()).isEqualTo(out[d.readings().size() + i]);
-                    assertThat(check.info().margin(check.value(), check.limit())).isEqualTo(check.margin());
+                    assertThat(Double.valueOf(check.margin())).isEqualTo(Double.valueOf(out[d.readings().size() + i]));
+                    assertThat(Double.valueOf(check.info().margin(check.value(), check.limit())))
+                            .isEqualTo(Double.valueOf(check.margin()));
                 }
             }
         }

@@ -1,0 +1,113 @@
+package slantfall.figure;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import slantfall.declare.Profile;
+import slantfall.figure.Pen.Lettering;
+
+/**
+ * The middle of the bench in one picture: the layout at true scale, the close-up with its traverses on the same wall-normal
+ * axis, the course along the slot below.
+ */
+public final class Board {
+
+    private static final double TITLE = 20;
+
+    private Board() {}
+
+    /**
+     * Draws a scene.
+     *
+     * @return what can be dragged and what the pointer can read
+     */
+    public static Drawn draw(Pen pen, Rect area, Scene scene) {
+        Optional<Strip> strip = Drawings.strip(scene);
+        if (strip.isEmpty()) {
+            pen.text(Lettering.of(Ink.FAINT, 0), "This arrangement has no drawing yet.", area.midX(), area.midY());
+            return new Drawn(List.of(), null, null);
+        }
+        return new Sheet(pen, scene, strip.get()).draw(area);
+    }
+
+    /** A small layout alone, for choosing an arrangement. */
+    public static void card(Pen pen, Rect area, Scene scene) {
+        Drawings.strip(scene).ifPresent(s -> new LayoutFigure(scene, s).draw(pen, area.inset(4, 4, 4, 4)));
+    }
+
+    /**
+     * What came of drawing.
+     *
+     * @param handles what can be dragged
+     * @param reading area in which the pointer reads values across the liquid, null if none
+     * @param frame axes of that area, null if none
+     */
+    public record Drawn(List<Handle> handles, Rect reading, Reader frame) {
+
+        /** The handle nearest to a point within a radius, null if none. */
+        public Handle at(double x, double y, double radius) {
+            Handle best = null;
+            double nearest = radius;
+            for (Handle h : handles) {
+                double distance = Math.hypot(h.x() - x, h.y() - y);
+                if (distance <= nearest) {
+                    nearest = distance;
+                    best = h;
+                }
+            }
+            return best;
+        }
+    }
+
+    /** Reads the distance from the wall at a height of the picture. */
+    @FunctionalInterface
+    public interface Reader {
+
+        /** Distance from the wall at a height [px to m]. */
+        double distance(double py);
+    }
+
+    private record Sheet(Pen pen, Scene scene, Strip strip) {
+
+        Drawn draw(Rect area) {
+            Profile courses = scene.assessment().profiles().courses();
+            boolean course = !courses.columns().isEmpty() && area.h() > 430;
+            double layoutHeight = area.h() * (course ? 0.3 : 0.38);
+            double courseHeight = course ? Math.min(150, 0.24 * area.h()) : 0;
+            Rect top = new Rect(area.x(), area.y() + TITLE, area.w(), layoutHeight - TITLE);
+            Rect middle = new Rect(
+                    area.x(), area.y() + layoutHeight + TITLE, area.w(), area.h() - layoutHeight - courseHeight - TITLE);
+            title("Layout, true scale and angle", area.x() + 8, area.y() + 14);
+            List<Handle> handles = new ArrayList<>(new LayoutFigure(scene, strip).draw(pen, top));
+            Drawn drawn = middle(middle, handles);
+            if (course) {
+                Rect below = new Rect(area.x(), area.bottom() - courseHeight, area.w(), courseHeight);
+                courses.column("pressure").ifPresent(c -> new CourseFigure(scene).draw(pen, below, c));
+            }
+            handles.forEach(h -> pen.disc(Ink.HANDLE, h.x(), h.y(), 5.5, true));
+            return drawn;
+        }
+
+        private Drawn middle(Rect middle, List<Handle> handles) {
+            double split = middle.x() + 0.47 * middle.w();
+            Rect close = new Rect(middle.x() + 52, middle.y() + 16, split - middle.x() - 62, middle.h() - 52);
+            Span up = scene.holds().hold("wall", CloseUpFigure.wanted(strip));
+            title("Close-up", middle.x() + 8, middle.y() + 2);
+            handles.addAll(new CloseUpFigure(scene, strip, close, up).draw(pen));
+            Rect right = new Rect(split + 10, close.y(), middle.right() - split - 20, close.h());
+            title("Traverses in the middle of the length", split + 10, middle.y() + 2);
+            Frame axes = new Frame(right, new Span(0, 1), up);
+            if (scene.assessment().profiles().traverses().columns().isEmpty()) {
+                pen.text(Lettering.of(Ink.FAINT, 0), "nothing flows", right.midX(), right.midY());
+            } else {
+                new TraverseFigure(scene, up).draw(pen, right, false);
+            }
+            Rect reading = new Rect(close.x(), close.y(), right.right() - close.x(), close.h());
+            return new Drawn(handles, reading, axes::valueY);
+        }
+
+        private void title(String text, double x, double y) {
+            pen.text(Lettering.of(Ink.TEXT, -1).heavy(), text, x, y);
+        }
+    }
+}
