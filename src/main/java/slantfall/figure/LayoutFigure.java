@@ -26,11 +26,13 @@ final class LayoutFigure {
 
     List<Handle> draw(Pen pen, Rect area) {
         place(area);
+        pen.clip(area);
         ground(pen, area);
         liquid(pen);
         arc(pen);
         dimension(pen);
         gravity(pen, area);
+        pen.unclip();
         return handles();
     }
 
@@ -42,7 +44,8 @@ final class LayoutFigure {
         double room = (area.w() - radius - 3 * PAD) / 2;
         pivotX = area.right() - PAD - Math.max(0, room);
         pivotY = both ? area.midY() : side.low() < 0 ? area.y() + 0.7 * PAD : area.bottom() - 1.1 * PAD;
-        scale = radius / scene.holds().hold("layout.length", new Span(0, strip.length())).high();
+        double thick = strip.filled() ? 2 * strip.deepest() : 0;
+        scale = radius / scene.holds().hold("layout.length", new Span(0, strip.length() + thick)).high();
     }
 
     /** A point along the plate from the outlet and above it. */
