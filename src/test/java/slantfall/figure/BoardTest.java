@@ -52,10 +52,9 @@ class BoardTest {
                 }
                 RecordingPen pen = drawn(setUp, new Holds());
                 assertThat(pen.clips).isZero();
-                for (double[] p : pen.points) {
-                    assertThat(p[0]).as(setUp.values().toString()).isFinite().isBetween(-300.0, 1100.0);
-                    assertThat(p[1]).as(setUp.values().toString()).isFinite().isBetween(-400.0, 1200.0);
-                }
+                String where = setUp.values().toString();
+                assertThat(pen.points).as(where).allMatch(
+                        p -> p[0] > -300 && p[0] < 1100 && p[1] > -400 && p[1] < 1200);
                 assertThat(pen.texts).noneMatch(t -> t.contains("NaN") || t.contains("Infinity"));
             }
         }
