@@ -103,10 +103,11 @@ public final class Board {
             double split = middle.x() + 0.47 * middle.w();
             Rect close = new Rect(middle.x() + 52, middle.y() + 16, split - middle.x() - 62, middle.h() - 56);
             Span up = scene.holds().hold("wall", CloseUpFigure.wanted(strip));
-            title("Close-up", middle.x() + 8, middle.y() + 2);
-            handles.addAll(new CloseUpFigure(scene, strip, close, up).draw(pen));
+            CloseUpFigure figure = new CloseUpFigure(scene, strip, close, up);
+            title("Close-up, " + figure.stretch(), middle.x() + 8, middle.y() + 2);
+            handles.addAll(figure.draw(pen));
             Rect right = new Rect(split + 10, close.y(), middle.right() - split - 20, close.h());
-            title("Traverses in the middle of the length", split + 10, middle.y() + 2);
+            title("Traverses at half length", split + 10, middle.y() + 2);
             Frame axes = new Frame(right, new Span(0, 1), up);
             if (scene.assessment().profiles().traverses().columns().isEmpty()) {
                 pen.text(Lettering.of(Ink.FAINT, 0), "nothing flows", right.midX(), right.midY());

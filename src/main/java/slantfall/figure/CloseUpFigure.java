@@ -48,7 +48,6 @@ final class CloseUpFigure {
             pen.text(Lettering.of(Ink.TEXT, 0), "no liquid to draw", area.midX(), area.midY());
         }
         gravity(pen);
-        stretch(pen);
         cursor(pen);
         return handles();
     }
@@ -143,11 +142,11 @@ final class CloseUpFigure {
         if (!(largest > 0)) {
             return;
         }
-        stress(pen, "on the wall ", lower, largest, frame.y(0) - 7, frame.y(0) - 12);
+        stress(pen, "wall ", lower, largest, frame.y(0) - 7, frame.y(0) - 12);
         if (!Double.isNaN(upper)) {
             // On a wall above, the liquid's drag is the negative of μ du/dy; on a surface the gas drags the liquid.
             double seen = strip.upper().wall() ? -upper : upper;
-            stress(pen, strip.upper().wall() ? "on the wall " : "gas drag ", seen, largest, top(0.88) + 7, top(0.88) + 22);
+            stress(pen, strip.upper().wall() ? "wall " : "gas ", seen, largest, top(0.3) + 8, top(0.3) + 22);
         }
         double speed = strip.upper().speed();
         if (speed != 0) {
@@ -159,10 +158,10 @@ final class CloseUpFigure {
     }
 
     private void stress(Pen pen, String name, double value, double largest, double y, double textY) {
-        double from = x(0.88);
+        double from = x(0.3);
         double reach = 0.16 * frame.area().w() * value / largest;
         Arrow.draw(pen, Stroke.of(Ink.STRESS, 2), from - reach / 2, y, from + reach / 2, y);
-        pen.text(Lettering.of(Ink.STRESS, 1), name + Show.value(value, Kind.STRESS, scene.units(), 3), frame.area().right() - 4, textY);
+        pen.text(Lettering.of(Ink.STRESS, 0), name + Show.value(value, Kind.STRESS, scene.units(), 3), from, textY);
     }
 
     private void gravity(Pen pen) {
@@ -176,14 +175,14 @@ final class CloseUpFigure {
         pen.text(Lettering.of(Ink.GRAVITY, 0).heavy(), "g", cx + (reach + 9) * gx, cy + (reach + 9) * gy + 4);
     }
 
-    private void stretch(Pen pen) {
+    /** How the picture is stretched, in words. */
+    String stretch() {
         double vertical = frame.area().h() / frame.up().length();
         double horizontal = frame.area().w() / frame.across().length();
         double factor = vertical / horizontal;
-        String text = factor >= 1
-                ? "drawn " + Show.number(factor, 2) + " × too thick for its length"
-                : "drawn " + Show.number(1 / factor, 2) + " × too long for its thickness";
-        pen.text(Lettering.of(Ink.FAINT, 1), text, frame.area().right(), frame.area().y() - 8);
+        return factor >= 1
+                ? "drawn " + Show.number(factor, 2) + " × too thick"
+                : "drawn " + Show.number(1 / factor, 2) + " × too long";
     }
 
     private void cursor(Pen pen) {

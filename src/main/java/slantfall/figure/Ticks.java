@@ -32,10 +32,17 @@ public record Ticks(double first, double step, int count, int decimals) {
                 break;
             }
         }
+        for (int i = STEPS.length - 2; i >= 0 && inside(low, high, step) < 2; i--) {
+            step = Math.min(step, STEPS[i] * power);
+        }
         double first = Math.ceil(low / step - 1e-9) * step;
         int count = Math.max(0, (int) Math.floor((high - first) / step + 1e-9) + 1);
         int decimals = Math.max(0, (int) -Math.floor(Math.log10(step) + 1e-9));
         return new Ticks(first, step, count, decimals);
+    }
+
+    private static int inside(double low, double high, double step) {
+        return (int) (Math.floor(high / step + 1e-9) - Math.ceil(low / step - 1e-9)) + 1;
     }
 
     /** The i-th tick. */
