@@ -102,16 +102,25 @@ final class FilmEvaluator implements Evaluator {
         out[10] = downhill && p.laminar() ? in.length() / largest(p) : Double.NaN;
         out[11] = h * in.width() * in.length();
         out[12] = entry;
-        filmCase = new FilmCase(
+        filmCase = filmCase(entry);
+    }
+
+    private FilmCase filmCase(double entry) {
+        FilmPoint p = point;
+        FilmPoint.Inputs in = p.inputs();
+        double reynolds = Double.isNaN(p.thickness()) ? Double.NaN : p.reynolds();
+        double filmNumber = FilmNumbers.filmNumber(p.density(), p.viscosity(), state.surfaceTension, Physics.G);
+        return new FilmCase(
                 in.angle(),
-                Double.isNaN(h) ? Double.NaN : p.reynolds(),
-                FilmNumbers.filmNumber(p.density(), p.viscosity(), state.surfaceTension, Physics.G),
+                reynolds,
+                filmNumber,
                 FilmNumbers.prandtl(p.viscosity(), state.heatCapacity, state.conductivity),
                 p.gradient(),
-                shear,
-                h,
+                in.shear(),
+                p.thickness(),
                 in.length(),
-                p.flowing() ? entry : h);
+                p.flowing() ? entry : p.thickness(),
+                FilmCase.Logs.of(reynolds, filmNumber));
     }
 
     private static double largest(FilmPoint p) {

@@ -12,6 +12,7 @@ package slantfall.check;
  * @param thickness film thickness [m]
  * @param length length of the incline [m]
  * @param entryLength length over which the film settles [m]
+ * @param logs logarithms that many limits share
  */
 public record FilmCase(
         double angle,
@@ -22,7 +23,22 @@ public record FilmCase(
         double shear,
         double thickness,
         double length,
-        double entryLength) {
+        double entryLength,
+        Logs logs) {
+
+    /**
+     * Logarithms that many limits share, so that a margin costs no power.
+     *
+     * @param reynolds ln Γ/μ
+     * @param filmNumber ln Ka_f
+     */
+    public record Logs(double reynolds, double filmNumber) {
+
+        /** Of a Reynolds number Γ/μ and a film number. */
+        public static Logs of(double reynolds, double filmNumber) {
+            return new Logs(Math.log(reynolds), Math.log(filmNumber));
+        }
+    }
 
     /** Whether the film runs under still air, which every published regime limit assumes. */
     boolean stillAir() {

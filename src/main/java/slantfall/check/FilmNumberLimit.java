@@ -3,6 +3,7 @@ package slantfall.check;
 import java.util.function.Predicate;
 import slantfall.declare.Check;
 import slantfall.declare.CheckInfo;
+import slantfall.declare.Margin;
 import slantfall.declare.Side;
 import slantfall.quantity.Kind;
 import slantfall.source.Source;
@@ -14,10 +15,16 @@ import slantfall.source.Source;
  * @param multiple the author's Reynolds number over Γ/μ
  * @param coefficient c
  * @param exponent e
+ * @param logOfLimit ln c less ln of the multiple
  * @param range whether a case lies where the limit was tested
  */
 public record FilmNumberLimit(
-        CheckInfo info, double multiple, double coefficient, double exponent, Predicate<FilmCase> range)
+        CheckInfo info,
+        double multiple,
+        double coefficient,
+        double exponent,
+        double logOfLimit,
+        Predicate<FilmCase> range)
         implements Check<FilmCase> {
 
     /** A limit on the Reynolds number of the given kind. */
@@ -28,6 +35,7 @@ public record FilmNumberLimit(
                 Reynolds.multiple(kind),
                 law.coefficient(),
                 law.exponent(),
+                Math.log(law.coefficient() / Reynolds.multiple(kind)),
                 range);
     }
 
@@ -44,6 +52,16 @@ public record FilmNumberLimit(
     @Override
     public boolean inRange(FilmCase c) {
         return range.test(c);
+    }
+
+    /** The same as by value and limit, from the logarithms: ln c + e ln Ka_f − ln Re. */
+    @Override
+    public double margin(FilmCase c) {
+        if (c.reynolds() <= 0) {
+            return exponent != 0 && Double.isNaN(c.filmNumber()) ? Double.NaN : Margin.CLAMP;
+        }
+        double ofFilm = exponent == 0 ? 0 : exponent * c.logs().filmNumber();
+        return Margin.clamp(logOfLimit + ofFilm - c.logs().reynolds());
     }
 
     /** c and e. */

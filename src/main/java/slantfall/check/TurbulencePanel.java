@@ -3,6 +3,7 @@ package slantfall.check;
 import java.util.List;
 import slantfall.declare.Check;
 import slantfall.declare.CheckInfo;
+import slantfall.declare.Margin;
 import slantfall.declare.Panel;
 import slantfall.declare.Side;
 import slantfall.quantity.Kind;
@@ -58,6 +59,8 @@ final class TurbulencePanel {
                 new Source("chun-seban-1971", "Chun and Seban 1971, J. Heat Transfer 93, 391",
                         "5840 is printed elsewhere, 0.7 % more", Mark.FROM_MEMORY));
 
+        private static final double LOG_OF_LIMIT = Math.log(5800.0 / 4);
+
         @Override
         public CheckInfo info() {
             return INFO;
@@ -71,6 +74,13 @@ final class TurbulencePanel {
         @Override
         public double limit(FilmCase c) {
             return 5800 * Math.pow(c.prandtl(), -1.06);
+        }
+
+        @Override
+        public double margin(FilmCase c) {
+            return c.reynolds() <= 0 && !Double.isNaN(c.prandtl())
+                    ? Margin.CLAMP
+                    : Margin.clamp(LOG_OF_LIMIT - 1.06 * Math.log(c.prandtl()) - c.logs().reynolds());
         }
 
         @Override

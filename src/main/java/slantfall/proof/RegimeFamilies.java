@@ -48,7 +48,7 @@ final class RegimeFamilies {
                     + "; the onset is known above 0 and up to 90 degrees");
         }
         FilmCase still = new FilmCase(angle, Double.NaN, Double.NaN, Double.NaN, Double.NaN, 0, Double.NaN, Double.NaN,
-                Double.NaN);
+                Double.NaN, FilmCase.Logs.of(Double.NaN, Double.NaN));
         double onset = limit("onset.benjamin-1957-yih-1963", still);
         return new double[] {onset, 4 * onset, 1.5 * onset};
     }
@@ -79,7 +79,8 @@ final class RegimeFamilies {
 
     private static FilmCase filmCase(double filmNumber, double prandtl) {
         return new FilmCase(
-                Math.PI / 2, Double.NaN, filmNumber, prandtl, Double.NaN, 0, Double.NaN, Double.NaN, Double.NaN);
+                Math.PI / 2, Double.NaN, filmNumber, prandtl, Double.NaN, 0, Double.NaN, Double.NaN, Double.NaN,
+                FilmCase.Logs.of(Double.NaN, filmNumber));
     }
 
     private static double limit(String key, FilmCase film) {

@@ -19,6 +19,8 @@ public final class FilmEntry {
 
     private static final double JOIN = 1.6;
 
+    private static final double CREEPING_JOINED = Math.pow(CREEPING, JOIN);
+
     private FilmEntry() {}
 
     /**
@@ -28,7 +30,6 @@ public final class FilmEntry {
      * @param thickness developed thickness [m]
      */
     public static double length(double reynolds, double thickness) {
-        double creeping = Math.pow(CREEPING, JOIN);
-        return thickness * Math.pow(creeping + Math.pow(INERTIAL * reynolds, JOIN), 1 / JOIN);
+        return thickness * Math.pow(CREEPING_JOINED + Math.pow(INERTIAL * reynolds, JOIN), 1 / JOIN);
     }
 }
