@@ -97,12 +97,13 @@ final class FilmEvaluator implements Evaluator {
         out[5] = p.reynolds();
         out[6] = 4 * p.reynolds();
         out[7] = p.laminar() ? Math.max(0, surface * h * p.density() / p.viscosity()) : Double.NaN;
-        out[8] = FilmNumbers.kapitza(p.density(), p.viscosity(), state.surfaceTension, Physics.G);
         out[9] = downhill ? in.length() / mean : Double.NaN;
         out[10] = downhill && p.laminar() ? in.length() / largest(p) : Double.NaN;
         out[11] = h * in.width() * in.length();
         out[12] = entry;
         filmCase = filmCase(entry);
+        // Ka is the cube root of Ka_f.
+        out[8] = Math.cbrt(filmCase.filmNumber());
     }
 
     private FilmCase filmCase(double entry) {
