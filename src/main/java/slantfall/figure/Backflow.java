@@ -41,13 +41,22 @@ record Backflow(double[] y, double[] u, double forward) {
 
     /** The distance from the wall where it runs back fastest [m]. */
     double middle() {
+        return y[worst()];
+    }
+
+    /** The velocity there [m/s]. */
+    double fastest() {
+        return u[worst()];
+    }
+
+    private int worst() {
         int worst = 0;
         for (int i = 1; i < u.length; i++) {
             if (u[i] * forward < u[worst] * forward) {
                 worst = i;
             }
         }
-        return y[worst];
+        return worst;
     }
 
     /** Fills the parts between the curve and the line of no motion. */

@@ -15,8 +15,8 @@ import slantfall.quantity.Show;
  */
 final class CloseUpFigure {
 
-    /** Part of the length at which the stresses are drawn. */
-    private static final double STRESS_AT = 0.86;
+    /** Part of the length at which the stresses are drawn, on the side that the velocity profile leaves free. */
+    private static final double STRESS_AT = 0.25;
     private static final double GRIP = 0.1;
     private static final double FILM_GRIP = 0.22;
     private static final double GRAVITY = 22;
@@ -123,27 +123,39 @@ final class CloseUpFigure {
         if (!(largest > 0)) {
             return;
         }
-        String most = strip.inletDepth() == strip.outletDepth() ? "" : "at most ";
+        String most = strip.inletDepth() == strip.outletDepth() ? "" : "up to ";
+        double at = profileToTheLeft() ? 1 - STRESS_AT : STRESS_AT;
         if (!Double.isNaN(lower)) {
-            stress(pen, "drag on wall " + most, lower, largest, frame.y(0) - 7, -6);
+            stress(pen, "drag " + most, lower, largest, new double[] {at, frame.y(0) - 7, -7});
         }
         if (!Double.isNaN(upper)) {
             // On a wall above, the liquid's drag is the negative of μ du/dy; on a surface the gas drags the liquid.
-            double seen = strip.upper().wall() ? -upper : upper;
-            String name = strip.upper().wall() ? "drag on wall " + most : "gas drag ";
             boolean wall = strip.upper().wall();
-            double y = top(STRESS_AT) + (wall ? 8 : -8);
-            stress(pen, name, seen, largest, y, wall ? 14 : -6);
+            double y = top(at) + (wall ? 9 + Math.abs(top(1) - top(0)) * 0.1 : -8);
+            stress(pen, wall ? "drag " + most : "gas drag ", wall ? -upper : upper, largest, new double[] {at, y, wall ? 15 : -7});
         }
     }
 
-    private void stress(TidyPen pen, String name, double value, double largest, double y, double textBy) {
-        double from = x(STRESS_AT);
+    private boolean profileToTheLeft() {
+        double sum = strip.upper().speed();
+        for (Profile.Column u : scene.assessment().profiles().traverses().columns()) {
+            if (u.key().equals("velocity")) {
+                for (double v : u.values()) {
+                    sum += v;
+                }
+            }
+        }
+        return sum < 0;
+    }
+
+    /** An arrow of the drag and its value; the place is part of the length, height and how far below its text lies [px]. */
+    private void stress(TidyPen pen, String name, double value, double largest, double[] place) {
+        double from = x(place[0]);
+        double y = place[1];
         double reach = 0.2 * frame.area().w() * value / largest;
         Arrow.draw(pen, Stroke.of(Ink.STRESS, 2), from - reach / 2, y, from + reach / 2, y);
         pen.block(new Rect(from - Math.abs(reach) / 2, y - 4, Math.abs(reach), 8));
-        String text = name + Show.value(value, Kind.STRESS, scene.units(), 3);
-        pen.note(Lettering.of(Ink.STRESS, 1), text, frame.area().right() - 4, y + textBy);
+        pen.note(Lettering.of(Ink.STRESS, 0), name + Show.value(value, Kind.STRESS, scene.units(), 3), from, y + place[2]);
     }
 
     /** Height of the arrow that is the wall's speed, above its hatching. */

@@ -31,16 +31,18 @@ final class CloseUpProfile {
         Profile.Column u = profile.column("velocity").orElse(null);
         if (u == null || Double.isNaN(u.values()[0])) {
             double middle = (frame.y(strip.depth(0.5)) + frame.y(0)) / 2;
-            pen.note(Lettering.of(Ink.TEXT, 0), "velocity profile unknown", frame.x(0.5 * strip.length()), middle);
+            pen.note(Lettering.of(Ink.TEXT, 0), "profile unknown", frame.x(0.5 * strip.length()), middle);
             return;
         }
         Backflow back = Backflow.of(profile.axis().values(), u.values(), scene.forward());
         curve(pen, profile.axis().values(), u.values(), back);
         if (back.any()) {
-            String what = strip.upper().wall() ? "runs back" : "runs uphill";
+            String what = strip.upper().wall() ? "part runs back" : "surface runs uphill";
             double y = frame.y(back.middle()) + 4;
             boolean left = scene.forward() > 0;
-            pen.note(Lettering.of(Ink.REVERSED, left ? -1 : 1).heavy(), what, frame.x(0.5 * strip.length()) + (left ? 8 : -8), y);
+            double base = frame.x(0.5 * strip.length());
+            pen.blockLine(base, y - 4, base + scale * back.fastest(), y - 4, 3);
+            pen.slip(Lettering.of(Ink.REVERSED, left ? 1 : -1).heavy(), what, base + (left ? -8 : 8), y + 12);
         }
     }
 

@@ -43,8 +43,7 @@ record Frame(Rect area, Span across, Span up) {
         for (int i = 0; i < ticks.count(); i++) {
             double px = x(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), px, area.y(), px, area.bottom());
-            String label = ticks.label(i);
-            pen.text(small, label, px, area.bottom() + TICK_LINE);
+            pen.text(small, ticks.label(i), px, area.bottom() + TICK_LINE);
         }
         pen.line(Stroke.of(Ink.AXIS, 1), area.x(), area.bottom(), area.right(), area.bottom());
         drawName(pen, name, unit.label());
@@ -65,16 +64,19 @@ record Frame(Rect area, Span across, Span up) {
     /** Grid lines of the vertical axis, and its labels on the left if there is room for them. */
     void drawUp(TidyPen pen, Unit unit, String name) {
         Ticks ticks = Ticks.of(unit.fromSi(up.low()), unit.fromSi(up.high()), (int) Math.max(3, area.h() / 30));
+        Lettering small = Lettering.of(Ink.FAINT, 1);
+        double widest = 28;
         for (int i = 0; i < ticks.count(); i++) {
             double py = y(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), area.x(), py, area.right(), py);
             if (!name.isEmpty()) {
-                pen.text(Lettering.of(Ink.FAINT, 1), ticks.label(i), area.x() - 5, py + 4);
+                pen.text(small, ticks.label(i), area.x() - 5, py + 4);
+                widest = Math.max(widest, pen.width(small, ticks.label(i)));
             }
         }
         if (!name.isEmpty()) {
             Lettering upright = Lettering.of(Ink.TEXT, 0).turned(90);
-            pen.text(upright, pen.fit(upright, name + ", " + unit.label(), area.h() + 10), area.x() - 40, area.midY());
+            pen.text(upright, pen.fit(upright, name + ", " + unit.label(), area.h() + 10), area.x() - widest - 11, area.midY());
         }
     }
 }

@@ -22,6 +22,7 @@ final class LayoutFigure {
     /** Depth from which liquid is drawn true to scale; below it a band of this width says that something is there [px]. */
     private static final double VISIBLE = 1.5;
     private static final double LEAST_LENGTH = 6;
+    private static final double NARROW = Math.toRadians(14);
 
     private final Scene scene;
     private final Strip strip;
@@ -42,7 +43,7 @@ final class LayoutFigure {
     }
 
     List<Handle> draw(Pen plain) {
-        TidyPen pen = TidyPen.on(plain, area);
+        TidyPen pen = TidyPen.on(plain, area).within(area);
         pen.clip(area);
         gravity(pen);
         liquid(pen);
@@ -134,7 +135,10 @@ final class LayoutFigure {
         double mid = strip.angle() / 2;
         pen.blockLine(pivotX, pivotY, pivotX - r - 30, pivotY, 1);
         String text = Show.value(strip.angle(), Kind.ANGLE, scene.units(), 3);
-        pen.note(Lettering.of(Ink.TEXT, 1).heavy(), text, pivotX - (r + 7) * Math.cos(mid), pivotY - (r + 7) * Math.sin(mid) + 4);
+        // Between a plate that is nearly level and the horizontal there is no room: below them then.
+        boolean narrow = Math.abs(strip.angle()) < NARROW;
+        double base = narrow ? pivotY + 15 : pivotY - (r + 7) * Math.sin(mid) + 4;
+        pen.note(Lettering.of(Ink.TEXT, 1).heavy(), text, pivotX - (r + 7) * Math.cos(mid), base);
     }
 
     private void ground(TidyPen pen) {

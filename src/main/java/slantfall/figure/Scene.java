@@ -44,6 +44,12 @@ public record Scene(Assessment assessment, UnitSystem units, Holds holds, double
         return any;
     }
 
+    /** Why the arrangement's first reading is unknown, empty if it is known. */
+    String reasonOfFirst() {
+        Assessment.ReadingValue first = assessment.readings().get(0);
+        return Double.isNaN(first.value()) ? reason(first.reading().kind()) : "";
+    }
+
     /** The value of a setting [SI], initial if untouched. */
     double setting(String key) {
         return assessment.declaration().setting(key).map(assessment.setUp()::value).orElse(Double.NaN);

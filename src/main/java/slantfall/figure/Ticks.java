@@ -1,6 +1,7 @@
 package slantfall.figure;
 
 import java.util.Locale;
+import slantfall.quantity.Show;
 
 /**
  * Places of ticks on a linear axis: steps of 1, 2 or 5 times a power of ten, labels with as many decimals as the step
@@ -23,19 +24,34 @@ public record Ticks(double first, double step, int count, int decimals) {
      * @param most largest number of ticks, 2 or more
      */
     public static Ticks of(double low, double high, int most) {
-        double rough = (high - low) / Math.max(1, most - 1);
+        double step = nice((high - low) / Math.max(1, most - 1));
+        // One tick alone says nothing of the scale.
+        if (count(low, high, step) < 2) {
+            step = nice(step * 0.45);
+        }
+        return at(low, high, step);
+    }
+
+    /** The smallest of 1, 2, 5, 10 times a power of ten that is not below a number. */
+    private static double nice(double rough) {
         double power = Math.pow(10, Math.floor(Math.log10(rough)));
-        double step = power * 10;
         for (double s : STEPS) {
             if (s * power >= rough * (1 - 1e-9)) {
-                step = s * power;
-                break;
+                return s * power;
             }
         }
+        return power * 10;
+    }
+
+    private static int count(double low, double high, double step) {
         double first = Math.ceil(low / step - 1e-9) * step;
-        int count = Math.max(0, (int) Math.floor((high - first) / step + 1e-9) + 1);
+        return Math.max(0, (int) Math.floor((high - first) / step + 1e-9) + 1);
+    }
+
+    private static Ticks at(double low, double high, double step) {
+        double first = Math.ceil(low / step - 1e-9) * step;
         int decimals = Math.max(0, (int) -Math.floor(Math.log10(step) + 1e-9));
-        return new Ticks(first, step, count, decimals);
+        return new Ticks(first, step, count(low, high, step), decimals);
     }
 
     /** The i-th tick. */
@@ -51,7 +67,8 @@ public record Ticks(double first, double step, int count, int decimals) {
             return "0";
         }
         if (step >= 1e5 || decimals > 4) {
-            return String.format(Locale.ROOT, "%.0e", value).replace("-", "−");
+            int digits = (int) Math.floor(Math.log10(Math.abs(value)) + 1e-9) - (int) Math.floor(Math.log10(step) + 1e-9) + 1;
+            return Show.number(value, Math.max(1, digits));
         }
         return String.format(Locale.ROOT, "%." + decimals + "f", value).replace('-', '−');
     }

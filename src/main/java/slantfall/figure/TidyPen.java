@@ -21,7 +21,7 @@ final class TidyPen implements Pen {
 
     private final Pen pen;
     private final Rect area;
-    private final List<Rect> taken = new ArrayList<>();
+    private final List<Rect> taken;
 
     /**
      * Writes into an area.
@@ -29,13 +29,23 @@ final class TidyPen implements Pen {
      * @param area no text leaves it
      */
     TidyPen(Pen pen, Rect area) {
+        this(pen, area, new ArrayList<>());
+    }
+
+    private TidyPen(Pen pen, Rect area, List<Rect> taken) {
         this.pen = pen;
         this.area = area;
+        this.taken = taken;
     }
 
     /** A pen on which nothing is written yet, or the same one if it is tidy already. */
     static TidyPen on(Pen pen, Rect area) {
         return pen instanceof TidyPen ? (TidyPen) pen : new TidyPen(pen, area);
+    }
+
+    /** The same sheet, with texts kept inside a part of it. */
+    TidyPen within(Rect part) {
+        return new TidyPen(pen, part, taken);
     }
 
     /** Keeps texts out of a rectangle. */
@@ -56,7 +66,7 @@ final class TidyPen implements Pen {
     /** Writes exactly here, or not at all where something stands already. */
     @Override
     public void text(Lettering lettering, String text, double x, double y) {
-        write(lettering, text, x, y);
+        write(lettering, text, x, y, false);
     }
 
     /**
@@ -65,6 +75,15 @@ final class TidyPen implements Pen {
      * @return whether there was room
      */
     boolean note(Lettering lettering, String text, double x, double y) {
+        return note(lettering, text, x, y, false);
+    }
+
+    /** A note on a slip of paper, so that it can be read on top of a curve. */
+    boolean slip(Lettering lettering, String text, double x, double y) {
+        return note(lettering, text, x, y, true);
+    }
+
+    private boolean note(Lettering lettering, String text, double x, double y, boolean slip) {
         double inX = x;
         double inY = y;
         if (lettering.turn() == 0) {
@@ -74,7 +93,7 @@ final class TidyPen implements Pen {
             inY = Math.min(Math.max(y, area.y() + ABOVE * lettering.size()), area.bottom() - BELOW * lettering.size());
         }
         for (double[] step : STEPS) {
-            if (write(lettering, text, inX + step[0] * LINE, inY + step[1] * LINE)) {
+            if (write(lettering, text, inX + step[0] * LINE, inY + step[1] * LINE, slip)) {
                 return true;
             }
         }
@@ -87,7 +106,7 @@ final class TidyPen implements Pen {
         double x = lettering.anchor() < 0 ? room.x() : room.midX();
         for (int i = 0; i < lines.size() && (i + 1) * LINE <= room.h(); i++) {
             boolean cut = (i + 2) * LINE > room.h() && i < lines.size() - 1;
-            write(lettering, cut ? lines.get(i) + " …" : lines.get(i), x, room.y() + (i + 1) * LINE - 3);
+            write(lettering, cut ? lines.get(i) + " …" : lines.get(i), x, room.y() + (i + 1) * LINE - 3, false);
         }
     }
 
@@ -116,7 +135,7 @@ final class TidyPen implements Pen {
         return cut;
     }
 
-    private boolean write(Lettering lettering, String text, double x, double y) {
+    private boolean write(Lettering lettering, String text, double x, double y, boolean slip) {
         List<Rect> boxes = boxes(lettering, text, x, y);
         for (Rect box : boxes) {
             if (box.x() < area.x() || box.right() > area.right() || box.y() < area.y() || box.bottom() > area.bottom()) {
@@ -129,6 +148,12 @@ final class TidyPen implements Pen {
             }
         }
         taken.addAll(boxes);
+        if (slip) {
+            Rect b = boxes.get(0);
+            pen.area(Ink.PAPER, 0.8, new double[] {b.x() - 2, b.right() + 2, b.right() + 2, b.x() - 2}, new double[] {
+                b.y(), b.y(), b.bottom(), b.bottom()
+            }, 4);
+        }
         pen.text(lettering, text, x, y);
         return true;
     }

@@ -31,8 +31,8 @@ final class TraverseFigure {
     void draw(TidyPen pen, Rect area, boolean labels) {
         int n = profile.columns().size();
         if (n == 0) {
-            String reason = scene.reason(profile.axis().kind());
-            pen.paragraph(Lettering.of(Ink.TEXT, 0), reason.isEmpty() ? "Nothing flows." : reason, area.inset(8, area.h() / 3, 8, 0));
+            String reason = scene.reasonOfFirst();
+            pen.paragraph(Lettering.of(Ink.TEXT, 0), reason.isEmpty() ? "nothing flows" : reason, area.inset(8, area.h() / 3, 8, 0));
             return;
         }
         double left = labels ? LEFT : 0;
@@ -100,7 +100,7 @@ final class TraverseFigure {
         back.fill(pen, frame::x, frame::y);
         if (back.any()) {
             Rect own = frame.area();
-            pen.note(Lettering.of(Ink.REVERSED, 0).heavy(), "runs back", own.midX(), Math.max(own.y() + 12, frame.y(back.middle()) + 4));
+            pen.slip(Lettering.of(Ink.REVERSED, 0).heavy(), "runs back", own.midX(), Math.max(own.y() + 12, frame.y(back.middle()) + 4));
         }
     }
 
@@ -116,7 +116,7 @@ final class TraverseFigure {
         pen.line(Stroke.dashed(Ink.CURSOR, 1), own.x(), py, own.right(), py);
         pen.disc(ink, frame.x(value), py, 4, true);
         String text = Show.value(value, column.kind(), scene.units(), 3);
-        pen.note(Lettering.of(Ink.TEXT, 0).heavy(), text, own.midX(), Math.max(own.y() + 12, py - 7));
+        pen.slip(Lettering.of(Ink.TEXT, 0).heavy(), text, own.midX(), Math.max(own.y() + 12, py - 7));
     }
 
     /** Linear interpolation on an increasing axis. */

@@ -82,7 +82,7 @@ public final class AssessmentJson {
     }
 
     /** A Reynolds number says its definition, any other kind its key. */
-    private static String kind(Kind kind) {
+    static String kind(Kind kind) {
         return kind.key().startsWith("reynolds") ? kind.words() : kind.key();
     }
 

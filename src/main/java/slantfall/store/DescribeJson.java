@@ -106,7 +106,7 @@ public final class DescribeJson {
                 .put("key", check.key())
                 .put("panel", check.panel())
                 .put("name", check.name())
-                .put("kind", check.kind().key())
+                .put("kind", AssessmentJson.kind(check.kind()))
                 .put("unit", check.kind().si().symbol())
                 .put("side", check.side().words())
                 .put("formula", check.formula())

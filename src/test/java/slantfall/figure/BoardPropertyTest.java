@@ -89,7 +89,7 @@ class BoardPropertyTest {
             assertThat(m.y()).as(m.what()).isFinite();
         });
         assertThat(pen.marks.stream().filter(m -> m.outside(area)).toList()).as("outside %s", area).isEmpty();
-        assertThat(pen.clipDepth()).as("clips left open").isZero();
+        assertThat(pen.clips).as("clips left open").isZero();
     }
 
     /** Pairs of texts that cover each other; a text along the slope is judged by its box only if it is short of a quarter turn. */

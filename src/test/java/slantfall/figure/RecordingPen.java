@@ -10,7 +10,10 @@ final class RecordingPen implements Pen {
 
     final List<Mark> marks = new ArrayList<>();
     final List<Said> said = new ArrayList<>();
-    private final Deque<Rect> clips = new ArrayDeque<>();
+    final List<String> texts = new ArrayList<>();
+    final List<double[]> points = new ArrayList<>();
+    int clips;
+    private final Deque<Rect> open = new ArrayDeque<>();
     private final SvgPen ruler = new SvgPen(1, 1, Palette.LIGHT.colours());
 
     /** A point that was drawn, with the clip it was drawn under, null if none. */
@@ -32,16 +35,9 @@ final class RecordingPen implements Pen {
         }
     }
 
-    List<String> texts() {
-        return said.stream().map(Said::text).toList();
-    }
-
-    int clipDepth() {
-        return clips.size();
-    }
-
     private void mark(String what, Ink ink, double x, double y) {
-        marks.add(new Mark(what, ink, x, y, clips.peek()));
+        points.add(new double[] {x, y});
+        marks.add(new Mark(what, ink, x, y, open.peek()));
     }
 
     @Override
@@ -73,6 +69,7 @@ final class RecordingPen implements Pen {
 
     @Override
     public void text(Lettering l, String text, double x, double y) {
+        texts.add(text);
         double w = width(l, text);
         double from = l.anchor() < 0 ? 0 : l.anchor() > 0 ? -w : -w / 2;
         double cos = Math.cos(Math.toRadians(-l.turn()));
@@ -101,11 +98,13 @@ final class RecordingPen implements Pen {
 
     @Override
     public void clip(Rect rect) {
-        clips.push(rect);
+        open.push(rect);
+        clips++;
     }
 
     @Override
     public void unclip() {
-        clips.pop();
+        open.pop();
+        clips--;
     }
 }

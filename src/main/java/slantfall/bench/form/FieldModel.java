@@ -10,9 +10,9 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import slantfall.bench.model.Desk;
+import slantfall.bench.model.Nudge;
 import slantfall.declare.Assessment;
 import slantfall.declare.Declaration;
-import slantfall.declare.Interval;
 import slantfall.declare.LiquidReport;
 import slantfall.declare.Scale;
 import slantfall.declare.Setting;
@@ -260,8 +260,8 @@ public final class FieldModel {
 
     /** Takes the place of the slider; the value snaps to a number that a person would type. */
     public void slide(double newPosition, Object gesture) {
-        double number = unit.get().fromSi(siAt(newPosition));
-        move(Nudge.snap(number, Nudge.step(setting, unit.get(), number)), gesture);
+        restore();
+        desk.moveNear(setting, siAt(newPosition), gesture);
     }
 
     /**
@@ -274,22 +274,10 @@ public final class FieldModel {
         if (Double.isNaN(si)) {
             return;
         }
+        restore();
         double number = unit.get().fromSi(si);
         BigDecimal step = Nudge.step(setting, unit.get(), number).multiply(BigDecimal.valueOf(factor));
-        move(Nudge.moved(number, step, direction), gesture);
-    }
-
-    private void move(BigDecimal number, Object gesture) {
-        double wanted = unit.get().toSi(number.doubleValue());
-        Interval possible = setting.possible();
-        if (!possible.contains(wanted)) {
-            return;
-        }
-        problem.set("");
-        text.set(shown);
-        String typed = Nudge.text(number) + (setting.kind().dimensionless() ? "" : " " + unit.get().symbol());
-        desk.session().set(setting.key(), Value.typed(wanted, typed), gesture);
-        desk.typedIn(setting.key(), unit.get());
+        desk.move(setting, Nudge.moved(number, step, direction), gesture);
     }
 
     /** Ends a drag or a run of keys, so that the next one is an undo step of its own. */

@@ -5,9 +5,12 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
+import slantfall.bench.model.CursorWords;
 import slantfall.bench.model.Desk;
 import slantfall.check.Cautions;
 import slantfall.declare.Assessment;
@@ -25,12 +28,19 @@ public final class LedgerModel {
     private final ObservableList<String> cautions = FXCollections.observableArrayList();
     private final ObservableList<String> notices = FXCollections.observableArrayList();
     private final BooleanProperty brief = new SimpleBooleanProperty();
+    private final ReadOnlyStringWrapper atCursor = new ReadOnlyStringWrapper("");
     private String arrangement = "";
 
     /** Follows a desk. */
     public LedgerModel(Desk desk) {
         this.desk = desk;
         desk.follow(this::refresh);
+        desk.cursorProperty().addListener((o, a, b) -> atCursor.set(CursorWords.of(desk)));
+    }
+
+    /** What the traverses say at the cursor, empty if it reads nothing. */
+    public ReadOnlyStringProperty atCursorProperty() {
+        return atCursor.getReadOnlyProperty();
     }
 
     /** Readings in declared order. */
@@ -96,6 +106,7 @@ public final class LedgerModel {
         }
         order(panels, Comparator.comparingDouble(PanelRow::tightest));
         refreshOwn(a, units);
+        atCursor.set(CursorWords.of(desk));
         set(cautions, a.cautions());
         set(notices, a.notices().stream()
                 .filter(n -> a.declaration().reading(n.about()).isEmpty())

@@ -98,7 +98,7 @@ public final class LedgerView extends ScrollPane {
     }
 
     private void arrange() {
-        VBox readingGroup = group("Readings", readings, copy());
+        VBox readingGroup = group("Readings", new VBox(2, readings, atCursor()), copy());
         VBox checkGroup = group("Checks, tightest first", checks, briefButton());
         boolean brief = model.briefProperty().get();
         content.getChildren().setAll(brief ? List.of(checkGroup, readingGroup, words)
@@ -112,6 +112,12 @@ public final class LedgerView extends ScrollPane {
         bar.setAlignment(Pos.CENTER_LEFT);
         bar.getStyleClass().add("group-bar");
         return new VBox(4, bar, inside);
+    }
+
+    private Label atCursor() {
+        Label line = Parts.line(model.atCursorProperty(), "at-cursor");
+        line.setId("at-cursor");
+        return line;
     }
 
     private Button copy() {

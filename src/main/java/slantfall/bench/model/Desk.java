@@ -1,5 +1,6 @@
 package slantfall.bench.model;
 
+import java.math.BigDecimal;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.HashMap;
@@ -7,11 +8,13 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
+import javafx.beans.property.DoubleProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleDoubleProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import slantfall.declare.Assessment;
 import slantfall.declare.Declaration;
@@ -43,6 +46,7 @@ public final class Desk {
     private final ReadOnlyBooleanWrapper canRedo = new ReadOnlyBooleanWrapper();
     private final ReadOnlyBooleanWrapper dirty = new ReadOnlyBooleanWrapper();
     private final ReadOnlyStringWrapper title = new ReadOnlyStringWrapper();
+    private final DoubleProperty cursor = new SimpleDoubleProperty(Double.NaN);
     private final Map<String, Unit> chosenUnits = new HashMap<>();
     private final List<Consumer<Assessment>> followers = new ArrayList<>();
     private long shown = -1;
@@ -88,6 +92,11 @@ public final class Desk {
     /** The units that numbers are shown in. */
     public ObjectProperty<UnitSystem> unitsProperty() {
         return units;
+    }
+
+    /** Distance from the lower wall at which the traverses are read [m], NaN for nowhere. */
+    public DoubleProperty cursorProperty() {
+        return cursor;
     }
 
     /** Whether there is something to undo. */
@@ -149,9 +158,37 @@ public final class Desk {
         }
     }
 
+    /**
+     * Moves a setting near a value, to a number that a person would type in the unit shown; what is impossible is left
+     * alone.
+     *
+     * @param wanted where to [SI]
+     * @param gesture equal ids in a row make one undo step
+     */
+    public void moveNear(Setting setting, double wanted, Object gesture) {
+        Unit unit = unit(setting, wanted == 0 ? setting.usual().high() : wanted);
+        double number = unit.fromSi(wanted);
+        move(setting, Nudge.snap(number, Nudge.step(setting, unit, number)), gesture);
+    }
+
+    /**
+     * Moves a setting to a number in the unit shown; what is impossible is left alone.
+     *
+     * @param number where to [in the unit shown]
+     */
+    public void move(Setting setting, BigDecimal number, Object gesture) {
+        Unit unit = unit(setting, setting.usual().high());
+        double si = unit.toSi(number.doubleValue());
+        if (setting.possible().contains(si)) {
+            String typed = Nudge.text(number) + (setting.kind().dimensionless() ? "" : " " + unit.symbol());
+            session.set(setting.key(), Value.typed(si, typed), gesture);
+        }
+    }
+
     /** Replaces everything by another set-up; its numbers are shown in the units that they were typed in. */
     public void open(SetUp opened, Path from, FileStamp stamp) {
         chosenUnits.clear();
+        cursor.set(Double.NaN);
         session.open(opened, from, stamp);
         for (Map.Entry<String, Value> entry : opened.values().entrySet()) {
             session.declaration()

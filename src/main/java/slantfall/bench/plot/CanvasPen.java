@@ -2,43 +2,42 @@ package slantfall.bench.plot;
 
 import java.util.EnumMap;
 import java.util.Map;
-import javafx.geometry.VPos;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.paint.Color;
+import javafx.scene.shape.StrokeLineCap;
 import javafx.scene.shape.StrokeLineJoin;
 import javafx.scene.text.Font;
 import javafx.scene.text.FontWeight;
 import javafx.scene.text.Text;
 import javafx.scene.text.TextAlignment;
 import slantfall.figure.Ink;
-import slantfall.figure.Palette;
 import slantfall.figure.Pen;
 import slantfall.figure.Rect;
 
-/** Draws figures on a canvas. */
+/** Draws a figure on the screen. */
 final class CanvasPen implements Pen {
 
-    private static final double[] DASHES = {4, 3};
+    private static final double[] BROKEN = {4, 3};
+    private static final String FAMILY = Font.getDefault().getFamily();
 
     private final GraphicsContext g;
     private final Map<Ink, Color> colours = new EnumMap<>(Ink.class);
-    private final Map<Long, Font> fonts = new java.util.HashMap<>();
-    private final Text ruler = new Text();
+    private final Text measure = new Text();
 
-    CanvasPen(GraphicsContext g) {
+    /**
+     * A pen.
+     *
+     * @param palette a colour for every ink
+     */
+    CanvasPen(GraphicsContext g, Map<Ink, String> palette) {
         this.g = g;
+        palette.forEach((ink, colour) -> colours.put(ink, Color.web(colour)));
+        g.setLineCap(StrokeLineCap.BUTT);
         g.setLineJoin(StrokeLineJoin.ROUND);
-        g.setTextBaseline(VPos.BASELINE);
-        colour(Palette.LIGHT);
     }
 
-    /** Takes the colours of a palette. */
-    void colour(Palette palette) {
-        palette.colours().forEach((ink, web) -> colours.put(ink, Color.web(web)));
-    }
-
-    /** Clears a picture to paper. */
-    void clear(double width, double height) {
+    /** Begins a picture anew. */
+    void blank(double width, double height) {
         g.setFill(colours.get(Ink.PAPER));
         g.fillRect(0, 0, width, height);
     }
@@ -46,20 +45,22 @@ final class CanvasPen implements Pen {
     private void take(Stroke stroke) {
         g.setStroke(colours.get(stroke.ink()));
         g.setLineWidth(stroke.width());
-        g.setLineDashes(stroke.dashed() ? DASHES : null);
+        g.setLineDashes(stroke.dashed() ? BROKEN : null);
     }
 
     @Override
     public void line(Stroke stroke, double x1, double y1, double x2, double y2) {
         take(stroke);
-        // An upright or level hair line is set on the pixel grid, so that it stays sharp.
-        boolean hair = stroke.width() <= 1 && (x1 == x2 || y1 == y2);
-        double shift = hair ? 0.5 : 0;
-        g.strokeLine(snap(x1, hair) + shift, snap(y1, hair) + shift, snap(x2, hair) + shift, snap(y2, hair) + shift);
-    }
-
-    private static double snap(double v, boolean on) {
-        return on ? Math.floor(v) : v;
+        boolean sharp = stroke.width() <= 1;
+        if (sharp && x1 == x2) {
+            double x = Math.floor(x1) + 0.5;
+            g.strokeLine(x, y1, x, y2);
+        } else if (sharp && y1 == y2) {
+            double y = Math.floor(y1) + 0.5;
+            g.strokeLine(x1, y, x2, y);
+        } else {
+            g.strokeLine(x1, y1, x2, y2);
+        }
     }
 
     @Override
@@ -79,10 +80,10 @@ final class CanvasPen implements Pen {
     @Override
     public void disc(Ink ink, double x, double y, double radius, boolean filled) {
         g.setFill(colours.get(filled ? ink : Ink.PAPER));
-        g.fillOval(x - radius, y - radius, 2 * radius, 2 * radius);
         g.setStroke(colours.get(filled ? Ink.PAPER : ink));
         g.setLineWidth(1.5);
         g.setLineDashes((double[]) null);
+        g.fillOval(x - radius, y - radius, 2 * radius, 2 * radius);
         g.strokeOval(x - radius, y - radius, 2 * radius, 2 * radius);
     }
 
@@ -102,24 +103,22 @@ final class CanvasPen implements Pen {
         g.restore();
     }
 
-    private Font font(Lettering l) {
-        long key = Math.round(l.size() * 10) * 2 + (l.bold() ? 1 : 0);
-        return fonts.computeIfAbsent(
-                key, k -> Font.font("System", l.bold() ? FontWeight.BOLD : FontWeight.NORMAL, l.size()));
-    }
-
     @Override
     public double width(Lettering l, String text) {
-        ruler.setFont(font(l));
-        ruler.setText(text);
-        return ruler.getLayoutBounds().getWidth();
+        measure.setFont(font(l));
+        measure.setText(text);
+        return measure.getLayoutBounds().getWidth();
+    }
+
+    private static Font font(Lettering l) {
+        return Font.font(FAMILY, l.bold() ? FontWeight.BOLD : FontWeight.NORMAL, l.size());
     }
 
     @Override
-    public void clip(Rect r) {
+    public void clip(Rect rect) {
         g.save();
         g.beginPath();
-        g.rect(r.x(), r.y(), r.w(), r.h());
+        g.rect(rect.x(), rect.y(), rect.w(), rect.h());
         g.clip();
     }
 

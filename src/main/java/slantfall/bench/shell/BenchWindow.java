@@ -49,7 +49,7 @@ public final class BenchWindow extends StackPane {
         rail = new RailView(railModel, disk::presets);
         LedgerModel ledgerModel = new LedgerModel(desk);
         ledger = new LedgerView(desk, ledgerModel);
-        pictures = new Pictures(desk, theme.darkProperty());
+        pictures = new Pictures(desk, theme);
         columns = new Columns(rail, pictures, ledger,
                 layout -> ledgerModel.briefProperty().set(layout == Columns.Layout.TWO_COLUMNS));
         finder = new FinderView(new FinderModel(desk), this::go);
@@ -73,9 +73,10 @@ public final class BenchWindow extends StackPane {
         return files;
     }
 
-    /** The settings, for tests. */
-    public RailModel rail() {
-        return railModel;
+    /** Puts the keyboard into the field of a setting; false if there is none. */
+    public boolean focusSetting(String key) {
+        columns.reveal(rail);
+        return rail.focus(key);
     }
 
     private static LiquidBase base(FileDesk disk) {
@@ -98,8 +99,7 @@ public final class BenchWindow extends StackPane {
 
     private void go(FinderModel.Hit hit) {
         if (hit.sort() == FinderModel.Sort.SETTING) {
-            columns.reveal(rail);
-            rail.focus(hit.key());
+            focusSetting(hit.key());
         } else {
             openRow(hit.key());
         }

@@ -1,4 +1,4 @@
-package slantfall.bench.form;
+package slantfall.bench.model;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
@@ -11,7 +11,7 @@ import slantfall.quantity.Unit;
  * Sensible steps of a setting in the unit it is shown in: 1, 2 or 5 times a power of ten, so that a slider and an arrow
  * key give numbers that a person would type.
  */
-final class Nudge {
+public final class Nudge {
 
     /** A linear setting has about this many steps over its usual range. */
     private static final double STEPS = 200;
@@ -29,14 +29,14 @@ final class Nudge {
      * @param number where [in the unit]
      * @return 1, 2 or 5 times a power of ten [in the unit]
      */
-    static BigDecimal step(Setting setting, Unit unit, double number) {
+    public static BigDecimal step(Setting setting, Unit unit, double number) {
         double linear = setting.usual().span() / unit.scale() / STEPS;
         double wanted = setting.scale() == Scale.LOG && number > 0 ? number * SHARE : linear;
         return nice(wanted);
     }
 
     /** The nearest of 1, 2 and 5 times a power of ten. */
-    static BigDecimal nice(double wanted) {
+    public static BigDecimal nice(double wanted) {
         int power = (int) Math.floor(Math.log10(wanted));
         double mantissa = wanted / Math.pow(10, power);
         int digit = mantissa < 1.5 ? 1 : mantissa < 3.5 ? 2 : mantissa < 7.5 ? 5 : 10;
@@ -44,14 +44,14 @@ final class Nudge {
     }
 
     /** The number moved to the nearest multiple of a step. */
-    static BigDecimal snap(double number, BigDecimal step) {
+    public static BigDecimal snap(double number, BigDecimal step) {
         return new BigDecimal(number, MathContext.DECIMAL64)
                 .divide(step, 0, RoundingMode.HALF_EVEN)
                 .multiply(step);
     }
 
     /** The number moved by whole steps; one between two multiples goes to the next one first. */
-    static BigDecimal moved(double number, BigDecimal step, int direction) {
+    public static BigDecimal moved(double number, BigDecimal step, int direction) {
         BigDecimal exact = new BigDecimal(number, MathContext.DECIMAL64);
         RoundingMode mode = direction > 0 ? RoundingMode.FLOOR : RoundingMode.CEILING;
         BigDecimal multiples = exact.divide(step, 9, RoundingMode.HALF_EVEN).setScale(0, mode);
@@ -59,7 +59,7 @@ final class Nudge {
     }
 
     /** The number as a person would type it. */
-    static String text(BigDecimal number) {
+    public static String text(BigDecimal number) {
         BigDecimal plain = number.signum() == 0 ? BigDecimal.ZERO : number.stripTrailingZeros();
         boolean odd = plain.precision() - plain.scale() > 7 || plain.scale() > 8;
         return odd ? plain.toString() : plain.toPlainString();

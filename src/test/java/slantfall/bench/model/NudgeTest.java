@@ -1,4 +1,4 @@
-package slantfall.bench.form;
+package slantfall.bench.model;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
