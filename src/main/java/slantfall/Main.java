@@ -3,6 +3,7 @@ package slantfall;
 import java.io.OutputStreamWriter;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
 import java.util.Locale;
 import slantfall.bench.Bench;
 import slantfall.console.Console;
@@ -14,13 +15,18 @@ import slantfall.console.ExampleRun;
  */
 public final class Main {
 
+    /** Opens the window on a file named after it. */
+    private static final String BENCH = "--bench";
+
     private Main() {}
 
     /** Entry point. */
     public static void main(String[] args) {
         PrintWriter out = new PrintWriter(new OutputStreamWriter(System.out, StandardCharsets.UTF_8), false);
         PrintWriter err = new PrintWriter(new OutputStreamWriter(System.err, StandardCharsets.UTF_8), true);
-        int status = args.length > 0 && !"--bench".equals(args[0]) ? Console.run(args, out, err) : bench(args, out, err);
+        boolean window = args.length == 0 || BENCH.equals(args[0]);
+        int status = window ? bench(Arrays.copyOfRange(args, Math.min(1, args.length), args.length), out, err)
+                : Console.run(args, out, err);
         out.flush();
         err.flush();
         System.exit(status);

@@ -56,7 +56,7 @@ public final class ClosedSlot implements Arrangement {
                     "μ du/dy at the lower wall where it is largest along the slot."),
             Reading.signed("wallShearUpper", "Stress at the upper wall", "τ_2", Kind.STRESS, 100,
                     "μ du/dy at the upper wall where it is largest along the slot; the force on the wall is its negative."),
-            Reading.positive("slotReynolds", "Slot Reynolds number 2b|u_m|/ν", "Re", Kind.REYNOLDS_SLOT,
+            Reading.positive("slotReynolds", "Slot Reynolds number 2bu/ν", "Re", Kind.REYNOLDS_SLOT,
                     "On D_h = 2b and the wide slot's mean velocity."),
             Reading.positive("residenceMean", "Mean residence time", "t_m", Kind.TIME, "Volume of the slot over flow."),
             Reading.positive("entryLength", "Entry length", "L_e", Kind.LENGTH, "Length to a developed profile, Chen 1973."),

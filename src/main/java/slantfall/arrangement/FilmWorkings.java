@@ -185,7 +185,7 @@ final class FilmWorkings {
                 .with("ρ", p.density(), Kind.DENSITY)
                 .with("μ", p.viscosity(), Kind.VISCOSITY)
                 .with("g", Physics.G, Kind.ACCELERATION)
-                .gives(new Names("Kapitza number", "Ka", Kind.KAPITZA), "σ/(ρ g^⅓ (μ/ρ)^{4/3})", value, DEFINITION, "any")
+                .gives(new Names("Kapitza number", "Ka", Kind.KAPITZA), "σ/(ρ g^⅓ (μ/ρ)^(4/3))", value, DEFINITION, "any")
                 .of("kapitza");
     }
 

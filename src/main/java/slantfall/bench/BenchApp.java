@@ -53,6 +53,7 @@ public final class BenchApp extends Application {
         fit(stage);
         openFirst();
         stage.show();
+        StartClock.maybe();
     }
 
     @Override

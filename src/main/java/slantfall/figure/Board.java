@@ -106,10 +106,11 @@ public final class Board {
             double height = Math.max(20, middle.h() - 18 - Frame.BELOW);
             Rect close = new Rect(middle.x() + 52, middle.y() + 18, split - middle.x() - 62, height);
             Span up = scene.holds().hold("wall", CloseUpFigure.wanted(strip));
-            title("Close-up", middle.x() + 8, middle.y() + 2, 100);
+            CloseUpFigure figure = new CloseUpFigure(scene, strip, close, up);
+            title("Close-up, " + figure.stretch(), middle.x() + 8, middle.y() + 2, split - middle.x() - 8);
             Rect right = new Rect(split + 10, close.y(), middle.right() - split - 22, height);
-            title("Traverses in the middle of the length", right.x(), middle.y() + 2, right.w());
-            handles.addAll(new CloseUpFigure(scene, strip, close, up).draw(pen));
+            title("Traverses at half length", right.x(), middle.y() + 2, right.w());
+            handles.addAll(figure.draw(pen));
             new TraverseFigure(scene, up).draw(pen, right, false);
             Rect reading = new Rect(close.x(), close.y(), right.right() - close.x(), height);
             return new Drawn(handles, reading, new Frame(right, new Span(0, 1), up)::valueY);

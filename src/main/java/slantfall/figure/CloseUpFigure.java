@@ -46,7 +46,6 @@ final class CloseUpFigure {
         List<Handle> handles = handles();
         frame.drawUp(pen, Display.unit(Kind.LENGTH, scene.units(), frame.up().high()), "from the wall");
         frame.drawAcross(pen, Display.unit(Kind.LENGTH, scene.units(), frame.across().high()), "along the flow");
-        stretch(pen);
         pen.clip(new Rect(area.x() - 1, area.y() - 10, area.w() + 2, area.h() + 20));
         liquid(pen);
         walls(pen);
@@ -190,14 +189,14 @@ final class CloseUpFigure {
         pen.note(Lettering.of(Ink.GRAVITY, -1).heavy(), "g", Math.max(cx + sideways, tipX) + 7, (cy + tipY) / 2 + 4);
     }
 
-    private void stretch(TidyPen pen) {
+    /** How the picture is stretched, in words. */
+    String stretch() {
         double vertical = frame.area().h() / frame.up().length();
         double horizontal = frame.area().w() / frame.across().length();
         double factor = vertical / horizontal;
-        String text = factor >= 1
-                ? "drawn " + Show.number(factor, 2) + " × thicker"
-                : "drawn " + Show.number(1 / factor, 2) + " × thinner";
-        pen.note(Lettering.of(Ink.FAINT, 1), text, frame.area().right(), frame.area().y() - 12);
+        return factor >= 1
+                ? "drawn " + Show.number(factor, 2) + " × too thick"
+                : "drawn " + Show.number(1 / factor, 2) + " × too long";
     }
 
     private void cursor(TidyPen pen) {

@@ -163,8 +163,8 @@ final class LayoutFigure {
 
     private void words(TidyPen pen) {
         double up = reach();
-        pen.note(Lettering.of(Ink.FAINT, 1), "in", px(up + 9, 4), py(up + 9, 4) + 4);
-        pen.note(Lettering.of(Ink.FAINT, -1), "out", px(-9, 4), py(-9, 4) + 4);
+        pen.beside(Lettering.of(Ink.FAINT, 1), "in", px(up + 9, 4), py(up + 9, 4) + 4);
+        pen.beside(Lettering.of(Ink.FAINT, -1), "out", px(-9, 4), py(-9, 4) + 4);
         if (strip.filled()) {
             String what = (strip.upper().wall() ? "gap " : "film ")
                     + Show.value(strip.deepest(), Kind.LENGTH, scene.units(), 3)

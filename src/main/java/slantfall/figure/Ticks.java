@@ -24,34 +24,26 @@ public record Ticks(double first, double step, int count, int decimals) {
      * @param most largest number of ticks, 2 or more
      */
     public static Ticks of(double low, double high, int most) {
-        double step = nice((high - low) / Math.max(1, most - 1));
-        // One tick alone says nothing of the scale.
-        if (count(low, high, step) < 2) {
-            step = nice(step * 0.45);
-        }
-        return at(low, high, step);
-    }
-
-    /** The smallest of 1, 2, 5, 10 times a power of ten that is not below a number. */
-    private static double nice(double rough) {
+        double rough = (high - low) / Math.max(1, most - 1);
         double power = Math.pow(10, Math.floor(Math.log10(rough)));
+        double step = power * 10;
         for (double s : STEPS) {
             if (s * power >= rough * (1 - 1e-9)) {
-                return s * power;
+                step = s * power;
+                break;
             }
         }
-        return power * 10;
-    }
-
-    private static int count(double low, double high, double step) {
+        for (int i = STEPS.length - 2; i >= 0 && inside(low, high, step) < 2; i--) {
+            step = Math.min(step, STEPS[i] * power);
+        }
         double first = Math.ceil(low / step - 1e-9) * step;
-        return Math.max(0, (int) Math.floor((high - first) / step + 1e-9) + 1);
-    }
-
-    private static Ticks at(double low, double high, double step) {
-        double first = Math.ceil(low / step - 1e-9) * step;
+        int count = Math.max(0, (int) Math.floor((high - first) / step + 1e-9) + 1);
         int decimals = Math.max(0, (int) -Math.floor(Math.log10(step) + 1e-9));
-        return new Ticks(first, step, count(low, high, step), decimals);
+        return new Ticks(first, step, count, decimals);
+    }
+
+    private static int inside(double low, double high, double step) {
+        return (int) (Math.floor(high / step + 1e-9) - Math.ceil(low / step - 1e-9)) + 1;
     }
 
     /** The i-th tick. */
@@ -60,7 +52,7 @@ public record Ticks(double first, double step, int count, int decimals) {
         return Math.abs(value) < step * 1e-9 ? 0 : value;
     }
 
-    /** Its label; beyond 99999 and below 0.0001 in powers of ten. */
+    /** Its label, with the digits that the step has; in powers of ten where the step is beyond 99999 or below 0.0001. */
     public String label(int i) {
         double value = at(i);
         if (value == 0) {

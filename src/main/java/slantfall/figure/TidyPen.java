@@ -15,6 +15,8 @@ final class TidyPen implements Pen {
         {6, 0}, {-6, 1}, {6, 1}, {-6, -1}, {6, -1}, {-10, 0}, {10, 0}
     };
 
+    /** How many of the steps keep a note beside the thing it names. */
+    private static final int NEARBY = 5;
     private static final double LINE = 14;
     private static final double ABOVE = 0.76;
     private static final double BELOW = 0.24;
@@ -75,15 +77,20 @@ final class TidyPen implements Pen {
      * @return whether there was room
      */
     boolean note(Lettering lettering, String text, double x, double y) {
-        return note(lettering, text, x, y, false);
+        return note(lettering, text, x, y, new Trial(STEPS.length, false));
     }
 
     /** A note on a slip of paper, so that it can be read on top of a curve. */
     boolean slip(Lettering lettering, String text, double x, double y) {
-        return note(lettering, text, x, y, true);
+        return note(lettering, text, x, y, new Trial(STEPS.length, true));
     }
 
-    private boolean note(Lettering lettering, String text, double x, double y, boolean slip) {
+    /** A note that would mislead further away. */
+    boolean beside(Lettering lettering, String text, double x, double y) {
+        return note(lettering, text, x, y, new Trial(NEARBY, false));
+    }
+
+    private boolean note(Lettering lettering, String text, double x, double y, Trial trial) {
         double inX = x;
         double inY = y;
         if (lettering.turn() == 0) {
@@ -92,13 +99,21 @@ final class TidyPen implements Pen {
             inX += Math.max(0, area.x() - left) - Math.max(0, left + w - area.right());
             inY = Math.min(Math.max(y, area.y() + ABOVE * lettering.size()), area.bottom() - BELOW * lettering.size());
         }
-        for (double[] step : STEPS) {
-            if (write(lettering, text, inX + step[0] * LINE, inY + step[1] * LINE, slip)) {
+        for (int i = 0; i < trial.steps(); i++) {
+            if (write(lettering, text, inX + STEPS[i][0] * LINE, inY + STEPS[i][1] * LINE, trial.slip())) {
                 return true;
             }
         }
         return false;
     }
+
+    /**
+     * How a note is placed.
+     *
+     * @param steps how many places are tried
+     * @param slip whether it stands on a slip of paper
+     */
+    private record Trial(int steps, boolean slip) {}
 
     /** Lines of words below each other, as many as fit; the first base line lies at y. */
     void paragraph(Lettering lettering, String text, Rect room) {

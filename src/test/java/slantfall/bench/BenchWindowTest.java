@@ -101,13 +101,15 @@ class BenchWindowTest {
         press(robot, KeyCode.UP);
         assertThat(bench.field("angle").getText()).isEqualTo("60.5");
         press(robot, KeyCode.SHIFT, KeyCode.DOWN);
-        assertThat(bench.field("angle").getText()).isEqualTo("55.5");
+        assertThat(bench.field("angle").getText()).isEqualTo("60");
+        press(robot, KeyCode.SHIFT, KeyCode.DOWN);
+        assertThat(bench.field("angle").getText()).isEqualTo("55");
         BenchFixture.onScreen(() -> {
             bench.slider("angle").requestFocus();
             return null;
         });
         press(robot, KeyCode.RIGHT);
-        assertThat(bench.field("angle").getText()).isEqualTo("56");
+        assertThat(bench.field("angle").getText()).isEqualTo("55.5");
     }
 
     @Test

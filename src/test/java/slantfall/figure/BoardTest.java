@@ -78,7 +78,7 @@ class BoardTest {
     void axesAndStretchAreLabelled() {
         RecordingPen pen = drawn(blank("closed-slot").with("gapOutlet", Value.of(2e-3)), new Holds());
         assertThat(pen.texts).contains("from the wall, mm", "along the flow, m", "Velocity, m/s", "Pressure, bar(a)");
-        assertThat(pen.texts).anyMatch(t -> t.matches("drawn .* × thicker"));
+        assertThat(pen.texts).anyMatch(t -> t.contains("too thick"));
     }
 
     @Test

@@ -102,7 +102,7 @@ public final class LedgerModel {
             a.panels().stream()
                     .filter(p -> p.panel().key().equals(row.panel().key()))
                     .findFirst()
-                    .ifPresent(p -> row.refresh(p, units));
+                    .ifPresent(p -> row.refresh(p, a.check("house." + p.panel().key()), units));
         }
         order(panels, Comparator.comparingDouble(PanelRow::tightest));
         refreshOwn(a, units);

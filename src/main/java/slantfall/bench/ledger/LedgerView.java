@@ -158,7 +158,7 @@ public final class LedgerView extends ScrollPane {
 
     private void buildChecks() {
         List<Node> nodes = new ArrayList<>();
-        model.own().forEach(row -> nodes.add(check(row)));
+        model.own().forEach(row -> nodes.add(check(row, false)));
         for (PanelRow row : model.panels()) {
             Opening opening = known(row.panel().key(), row, () -> new Opening(Rows.panel(row), false, () -> authors(row)));
             nodes.add(opening);
@@ -180,14 +180,14 @@ public final class LedgerView extends ScrollPane {
         return made;
     }
 
-    private Opening check(CheckRow row) {
-        return known(row.key(), row, () -> new Opening(Rows.check(row), true, () -> criterion(row)));
+    private Opening check(CheckRow row, boolean regime) {
+        return known(row.key(), row, () -> new Opening(Rows.check(row, regime), true, () -> criterion(row)));
     }
 
     private Node authors(PanelRow row) {
         VBox box = new VBox(2);
         box.getStyleClass().add("authors");
-        row.authors().forEach(author -> box.getChildren().add(check(author)));
+        row.authors().forEach(author -> box.getChildren().add(check(author, row.regime())));
         return box;
     }
 
@@ -201,12 +201,29 @@ public final class LedgerView extends ScrollPane {
         return box;
     }
 
+    /** Labels stay where only their text is another: new ones would have to be styled within the frame. */
     private void buildWords() {
-        List<Node> nodes = new ArrayList<>();
-        model.cautions().forEach(c -> nodes.add(styled("⚠ " + c, "caution")));
-        model.notices().forEach(n -> nodes.add(styled("Note: " + n, "notice")));
-        nodes.add(styled(model.general(), Mark.MUTED));
-        words.getChildren().setAll(nodes);
+        List<String> cautions = model.cautions();
+        List<String> notices = model.notices();
+        int wanted = cautions.size() + notices.size() + 1;
+        while (words.getChildren().size() > wanted) {
+            words.getChildren().remove(0);
+        }
+        while (words.getChildren().size() < wanted) {
+            words.getChildren().add(0, styled("", Mark.MUTED));
+        }
+        for (int i = 0; i < wanted; i++) {
+            boolean caution = i < cautions.size();
+            boolean last = i == wanted - 1;
+            String text = caution ? "⚠ " + cautions.get(i) : last ? model.general()
+                    : "Note: " + notices.get(i - cautions.size());
+            Label label = (Label) words.getChildren().get(i);
+            label.setText(text);
+            String style = caution ? "caution" : last ? Mark.MUTED : "notice";
+            if (!label.getStyleClass().contains(style)) {
+                label.getStyleClass().setAll("label", style);
+            }
+        }
     }
 
     private static Label wrapped(String text) {

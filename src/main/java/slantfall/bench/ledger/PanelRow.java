@@ -50,9 +50,14 @@ public final class PanelRow {
         return margin.getReadOnlyProperty();
     }
 
-    /** The verdict of the tightest rule that counts. */
+    /** The verdict of the house rule, else of the tightest rule that counts. */
     public ReadOnlyObjectProperty<Verdict> verdictProperty() {
         return verdict.getReadOnlyProperty();
+    }
+
+    /** Whether crossing is a change of manner and no failure. */
+    public boolean regime() {
+        return panel.kindOfPanel() == Panel.Sort.REGIME;
     }
 
     /** Smallest margin among the rules that count, infinite if none does. */
@@ -60,7 +65,7 @@ public final class PanelRow {
         return tightest;
     }
 
-    void refresh(PanelResult fresh, UnitSystem units) {
+    void refresh(PanelResult fresh, Optional<CheckResult> house, UnitSystem units) {
         for (CheckRow row : authors) {
             fresh.results().stream()
                     .filter(r -> r.info().key().equals(row.key()))
@@ -72,7 +77,7 @@ public final class PanelRow {
                 .filter(CheckResult::counts)
                 .min(Comparator.comparingDouble(CheckResult::margin));
         tightest = least.map(CheckResult::margin).orElse(Double.POSITIVE_INFINITY);
-        verdict.set(least.map(CheckResult::verdict).orElse(Verdict.UNKNOWN));
+        verdict.set(house.or(() -> least).map(CheckResult::verdict).orElse(Verdict.UNKNOWN));
         margin.set(least.map(r -> MarginWords.of(r) + (authors.size() > 1 ? ", " + r.info().name() : "")).orElse(""));
     }
 }

@@ -21,7 +21,7 @@ final class Rows {
     private Rows() {}
 
     static HBox reading(ReadingRow row) {
-        Label name = Parts.label(row.reading().name(), Mark.NAME);
+        Label name = Parts.label(Parts.pretty(row.reading().name()), Mark.NAME);
         name.setMinWidth(40);
         name.setWrapText(true);
         HBox.setHgrow(name, Priority.SOMETIMES);
@@ -54,16 +54,23 @@ final class Rows {
         }
     }
 
-    static VBox check(CheckRow row) {
+    /**
+     * A check.
+     *
+     * @param regime whether crossing it is a change of manner and no failure
+     */
+    static VBox check(CheckRow row, boolean regime) {
         Label name = Parts.label("", Mark.NAME);
         name.textProperty().bind(row.nameProperty());
         name.setWrapText(true);
         Label margin = Parts.label("", "margin");
         margin.textProperty().bind(row.marginProperty());
         margin.setMinWidth(Region.USE_PREF_SIZE);
-        HBox first = new HBox(6, verdict(row.verdictProperty()), name, Parts.spring(), margin);
+        Label verdict = verdict(row.verdictProperty());
+        verdict.pseudoClassStateChanged(Mark.state("regime"), regime);
+        HBox first = new HBox(6, verdict, name, Parts.spring(), margin);
         first.setAlignment(Pos.BASELINE_LEFT);
-        Label compared = Parts.line(row.comparedProperty(), "compared");
+        Label compared = Parts.oneLine(row.comparedProperty(), "compared");
         VBox below = new VBox(1, compared, Parts.line(row.noteProperty(), Mark.MUTED));
         below.getStyleClass().add("below-verdict");
         VBox box = new VBox(1, first, below);
@@ -79,10 +86,12 @@ final class Rows {
     static VBox panel(PanelRow row) {
         Label question = Parts.label(row.panel().question(), Mark.NAME);
         question.setWrapText(true);
-        HBox first = new HBox(6, verdict(row.verdictProperty()), question);
+        Label verdict = verdict(row.verdictProperty());
+        verdict.pseudoClassStateChanged(Mark.state("regime"), row.regime());
+        HBox first = new HBox(6, verdict, question);
         first.setAlignment(Pos.BASELINE_LEFT);
-        Label phrase = Parts.line(row.phraseProperty(), "phrase");
-        Label margin = Parts.line(row.marginProperty(), "margin");
+        Label phrase = Parts.oneLine(row.phraseProperty(), "phrase");
+        Label margin = Parts.oneLine(row.marginProperty(), "margin");
         VBox below = new VBox(1, phrase, margin);
         below.getStyleClass().add("below-verdict");
         VBox box = new VBox(1, first, below);

@@ -19,6 +19,11 @@ public final class Parts {
         return label;
     }
 
+    /** Words with a formula in them, set as far as plain letters can: u_m as uₘ, ν^{4/3} as ν^(4/3). */
+    public static String pretty(String words) {
+        return words.replace("_m", "ₘ").replace("_s", "ₛ").replace("^{", "^(").replace("}", ")");
+    }
+
     /** A label that wraps and takes no room while it is empty. */
     public static Label line(ObservableValue<String> text, String... styles) {
         Label label = label("", styles);
@@ -27,6 +32,14 @@ public final class Parts {
         label.textProperty().bind(text);
         label.managedProperty().bind(label.textProperty().isNotEmpty());
         label.visibleProperty().bind(label.managedProperty());
+        return label;
+    }
+
+    /** A label of one line that takes no room while it is empty. */
+    public static Label oneLine(ObservableValue<String> text, String... styles) {
+        Label label = line(text, styles);
+        label.setWrapText(false);
+        label.setMinWidth(0);
         return label;
     }
 

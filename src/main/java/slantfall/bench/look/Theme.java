@@ -30,7 +30,7 @@ public final class Theme {
 
     private void show(Scene scene) {
         Application.setUserAgentStylesheet(
-                dark.get() ? new PrimerDark().getUserAgentStylesheet() : new PrimerLight().getUserAgentStylesheet());
+                dark.get() ? new PrimerDark().getUserAgentStylesheetBSS() : new PrimerLight().getUserAgentStylesheetBSS());
         scene.getRoot().getStyleClass().remove(DARK);
         if (dark.get()) {
             scene.getRoot().getStyleClass().add(DARK);
