@@ -15,6 +15,8 @@ import slantfall.quantity.Show;
 public final class Board {
 
     private static final double TITLE = 20;
+    /** Height from which there is room for courses below [px]. */
+    private static final double COURSE_FROM = 430;
 
     private Board() {}
 
@@ -26,15 +28,15 @@ public final class Board {
     public static Drawn draw(Pen pen, Rect area, Scene scene) {
         Optional<Strip> strip = Drawings.strip(scene);
         if (strip.isEmpty()) {
-            pen.text(Lettering.of(Ink.FAINT, 0), "This arrangement has no drawing yet.", area.midX(), area.midY());
+            pen.text(Lettering.of(Ink.FAINT, 0), "This arrangement has no drawing.", area.midX(), area.midY());
             return new Drawn(List.of(), null, null);
         }
-        return new Sheet(pen, scene, strip.get()).draw(area);
+        return new Sheet(TidyPen.on(pen, area), scene, strip.get()).draw(area);
     }
 
     /** A small layout alone, for choosing an arrangement. */
     public static void card(Pen pen, Rect area, Scene scene) {
-        Drawings.strip(scene).ifPresent(s -> new LayoutFigure(scene, s).draw(pen, area.inset(4, 4, 4, 4)));
+        Drawings.strip(scene).ifPresent(s -> new LayoutFigure(scene, s, area.inset(4, 4, 4, 4)).draw(pen));
     }
 
     /** The picture in words, for readers who cannot see it. */
@@ -78,22 +80,22 @@ public final class Board {
         double distance(double py);
     }
 
-    private record Sheet(Pen pen, Scene scene, Strip strip) {
+    private record Sheet(TidyPen pen, Scene scene, Strip strip) {
 
         Drawn draw(Rect area) {
             Profile courses = scene.assessment().profiles().courses();
-            boolean course = !courses.columns().isEmpty() && area.h() > 430;
+            boolean course = !courses.columns().isEmpty() && area.h() > COURSE_FROM;
             double layoutHeight = area.h() * (course ? 0.3 : 0.38);
             double courseHeight = course ? Math.min(160, 0.25 * area.h()) : 0;
             Rect top = new Rect(area.x(), area.y() + TITLE, area.w(), layoutHeight - TITLE);
             Rect middle = new Rect(
                     area.x(), area.y() + layoutHeight + TITLE, area.w(), area.h() - layoutHeight - courseHeight - TITLE);
-            title("Layout, true scale and angle", area.x() + 8, area.y() + 14);
-            List<Handle> handles = new ArrayList<>(new LayoutFigure(scene, strip).draw(pen, top));
+            title("Layout, true scale and angle", area.x() + 8, area.y() + 14, area.w() - 16);
+            List<Handle> handles = new ArrayList<>(new LayoutFigure(scene, strip, top).draw(pen));
             Drawn drawn = middle(middle, handles);
             if (course) {
-                Rect below = new Rect(area.x(), area.bottom() - courseHeight, area.w(), courseHeight);
-                courses.column("pressure").ifPresent(c -> new CourseFigure(scene).draw(pen, below, c));
+                new CourseFigure(scene).draw(
+                        pen, new Rect(area.x(), area.bottom() - courseHeight, area.w(), courseHeight));
             }
             handles.forEach(h -> pen.disc(Ink.HANDLE, h.x(), h.y(), 5.5, true));
             return drawn;
@@ -101,25 +103,22 @@ public final class Board {
 
         private Drawn middle(Rect middle, List<Handle> handles) {
             double split = middle.x() + 0.47 * middle.w();
-            Rect close = new Rect(middle.x() + 52, middle.y() + 16, split - middle.x() - 62, middle.h() - 56);
+            double height = Math.max(20, middle.h() - 18 - Frame.BELOW);
+            Rect close = new Rect(middle.x() + 52, middle.y() + 18, split - middle.x() - 62, height);
             Span up = scene.holds().hold("wall", CloseUpFigure.wanted(strip));
             CloseUpFigure figure = new CloseUpFigure(scene, strip, close, up);
-            title("Close-up, " + figure.stretch(), middle.x() + 8, middle.y() + 2);
+            title("Close-up, " + figure.stretch(), middle.x() + 8, middle.y() + 2, split - middle.x() - 8);
+            Rect right = new Rect(split + 10, close.y(), middle.right() - split - 22, height);
+            title("Traverses at half length", right.x(), middle.y() + 2, right.w());
             handles.addAll(figure.draw(pen));
-            Rect right = new Rect(split + 10, close.y(), middle.right() - split - 20, close.h());
-            title("Traverses at half length", split + 10, middle.y() + 2);
-            Frame axes = new Frame(right, new Span(0, 1), up);
-            if (scene.assessment().profiles().traverses().columns().isEmpty()) {
-                pen.text(Lettering.of(Ink.FAINT, 0), "nothing flows", right.midX(), right.midY());
-            } else {
-                new TraverseFigure(scene, up).draw(pen, right, false);
-            }
-            Rect reading = new Rect(close.x(), close.y(), right.right() - close.x(), close.h());
-            return new Drawn(handles, reading, axes::valueY);
+            new TraverseFigure(scene, up).draw(pen, right, false);
+            Rect reading = new Rect(close.x(), close.y(), right.right() - close.x(), height);
+            return new Drawn(handles, reading, new Frame(right, new Span(0, 1), up)::valueY);
         }
 
-        private void title(String text, double x, double y) {
-            pen.text(Lettering.of(Ink.TEXT, -1).heavy(), text, x, y);
+        private void title(String text, double x, double y, double room) {
+            Lettering heavy = Lettering.of(Ink.TEXT, -1).heavy();
+            pen.text(heavy, pen.fit(heavy, text, room), x, y);
         }
     }
 }

@@ -15,17 +15,23 @@ import slantfall.quantity.Show;
  */
 final class CloseUpFigure {
 
-    private static final int ARROWS = 9;
+    /** Part of the length at which the stresses are drawn, on the side that the velocity profile leaves free. */
+    private static final double STRESS_AT = 0.25;
+    private static final double GRIP = 0.1;
+    private static final double FILM_GRIP = 0.22;
+    private static final double GRAVITY = 22;
 
     private final Scene scene;
     private final Strip strip;
     private final Frame frame;
+    private final double speedScale;
 
     CloseUpFigure(Scene scene, Strip strip, Rect area, Span up) {
         this.scene = scene;
         this.strip = strip;
         Span along = scene.holds().hold("closeup.length", new Span(0, strip.length()));
         this.frame = new Frame(area, along, up);
+        this.speedScale = speedScale();
     }
 
     /** The stretch of the wall-normal axis that the liquid wants. */
@@ -33,23 +39,28 @@ final class CloseUpFigure {
         return Span.around(0, strip.filled() ? 1.2 * strip.deepest() : 1e-3);
     }
 
-    List<Handle> draw(Pen pen) {
+    List<Handle> draw(Pen plain) {
         Rect area = frame.area();
+        Rect whole = new Rect(area.x() - 52, area.y() - 18, area.w() + 60, area.h() + 18 + Frame.BELOW);
+        TidyPen pen = TidyPen.on(plain, whole);
+        List<Handle> handles = handles();
         frame.drawUp(pen, Display.unit(Kind.LENGTH, scene.units(), frame.up().high()), "from the wall");
         frame.drawAcross(pen, Display.unit(Kind.LENGTH, scene.units(), frame.across().high()), "along the flow");
         pen.clip(new Rect(area.x() - 1, area.y() - 10, area.w() + 2, area.h() + 20));
         liquid(pen);
         walls(pen);
-        pen.unclip();
+        handles.forEach(h -> pen.block(new Rect(h.x() - 7, h.y() - 7, 14, 14)));
+        cursor(pen);
         if (strip.filled()) {
-            velocity(pen);
+            new CloseUpProfile(scene, strip, frame, speedScale).draw(pen);
             stresses(pen);
+            wallSpeed(pen);
         } else {
-            pen.text(Lettering.of(Ink.TEXT, 0), "no liquid to draw", area.midX(), area.midY());
+            pen.note(Lettering.of(Ink.TEXT, 0), "no liquid to draw", area.midX(), area.midY());
         }
         gravity(pen);
-        cursor(pen);
-        return handles();
+        pen.unclip();
+        return handles;
     }
 
     private double x(double part) {
@@ -60,14 +71,14 @@ final class CloseUpFigure {
         return frame.y(strip.depth(part));
     }
 
-    private void liquid(Pen pen) {
+    private void liquid(TidyPen pen) {
         if (strip.filled()) {
             double bottom = frame.y(0);
             pen.area(Ink.LIQUID, 0.75, new double[] {x(0), x(1), x(1), x(0)}, new double[] {bottom, bottom, top(1), top(0)}, 4);
         }
     }
 
-    private void walls(Pen pen) {
+    private void walls(TidyPen pen) {
         hatch(pen, frame.y(0), frame.y(0), 1, Ink.WALL);
         if (!strip.filled()) {
             return;
@@ -77,10 +88,11 @@ final class CloseUpFigure {
         } else {
             pen.line(Stroke.of(Ink.LIQUID_EDGE, 2), x(0), top(0), x(1), top(1));
         }
+        pen.blockLine(x(0), top(0), x(1), top(1), 2);
     }
 
     /** A wall's face with short strokes behind it. */
-    private void hatch(Pen pen, double y0, double y1, int below, Ink ink) {
+    private void hatch(TidyPen pen, double y0, double y1, int below, Ink ink) {
         pen.line(Stroke.of(ink, 2.5), x(0), y0, x(1), y1);
         double from = x(0);
         double to = x(1);
@@ -90,6 +102,7 @@ final class CloseUpFigure {
         }
     }
 
+    /** Pixels per speed; the fastest arrow takes two fifths of the width. */
     private double speedScale() {
         Profile.Column u = scene.assessment().profiles().traverses().column("velocity").orElse(null);
         double largest = Math.abs(strip.upper().speed());
@@ -102,77 +115,78 @@ final class CloseUpFigure {
         return 0.4 * frame.area().w() / held;
     }
 
-    private void velocity(Pen pen) {
-        Profile profile = scene.assessment().profiles().traverses();
-        Profile.Column u = profile.column("velocity").orElse(null);
-        if (u == null || Double.isNaN(u.values()[0])) {
-            pen.text(Lettering.of(Ink.TEXT, 0), "profile unknown", x(0.5), (top(0.5) + frame.y(0)) / 2);
-            return;
-        }
-        double scale = speedScale();
-        double base = x(0.5);
-        double[] y = profile.axis().values();
-        double[] px = new double[y.length];
-        double[] py = new double[y.length];
-        boolean back = false;
-        for (int i = 0; i < y.length; i++) {
-            px[i] = base + scale * u.values()[i];
-            py[i] = frame.y(y[i]);
-        }
-        pen.line(Stroke.dashed(Ink.VELOCITY, 1), base, frame.y(0), base, py[y.length - 1]);
-        double forward = scene.assessment().declaration().reading("flow").isPresent()
-                ? Math.signum(scene.assessment().value("flow")) : 1;
-        for (int k = 1; k <= ARROWS; k++) {
-            int i = k * (y.length - 1) / ARROWS;
-            boolean against = u.values()[i] * (forward == 0 ? 1 : forward) < 0;
-            back |= against;
-            Arrow.draw(pen, Stroke.of(against ? Ink.REVERSED : Ink.VELOCITY, 1.3), base, py[i], px[i], py[i]);
-        }
-        pen.polyline(Stroke.of(Ink.VELOCITY, 2), px, py, y.length);
-        if (back) {
-            pen.text(Lettering.of(Ink.REVERSED, 1).heavy(), strip.upper().wall() ? "part runs back" : "surface runs uphill",
-                    base - 8, frame.area().y() + 14);
-        }
-    }
-
-    private void stresses(Pen pen) {
+    private void stresses(TidyPen pen) {
         double lower = strip.stresses().lower();
         double upper = strip.stresses().upper();
-        double largest = Math.max(Math.abs(lower), Double.isNaN(upper) ? 0 : Math.abs(upper));
+        double largest = Math.max(Double.isNaN(lower) ? 0 : Math.abs(lower), Double.isNaN(upper) ? 0 : Math.abs(upper));
         if (!(largest > 0)) {
             return;
         }
-        stress(pen, "wall ", lower, largest, frame.y(0) - 7, frame.y(0) - 12);
+        String most = strip.inletDepth() == strip.outletDepth() ? "" : "up to ";
+        double at = profileToTheLeft() ? 1 - STRESS_AT : STRESS_AT;
+        if (!Double.isNaN(lower)) {
+            stress(pen, "drag " + most, lower, largest, new double[] {at, frame.y(0) - 7, -7});
+        }
         if (!Double.isNaN(upper)) {
             // On a wall above, the liquid's drag is the negative of μ du/dy; on a surface the gas drags the liquid.
-            double seen = strip.upper().wall() ? -upper : upper;
-            stress(pen, strip.upper().wall() ? "wall " : "gas ", seen, largest, top(0.3) + 8, top(0.3) + 22);
-        }
-        double speed = strip.upper().speed();
-        if (speed != 0) {
-            double y = Math.max(frame.area().y() + 2, top(0.5) - 9);
-            Arrow.draw(pen, Stroke.of(Ink.MOVING_WALL, 2.5), x(0.5), y, x(0.5) + speedScale() * speed, y);
-            pen.text(Lettering.of(Ink.MOVING_WALL, 0).heavy(),
-                    "wall " + Show.value(speed, Kind.VELOCITY, scene.units(), 3), x(0.5), y - 5);
+            boolean wall = strip.upper().wall();
+            double y = top(at) + (wall ? 9 + Math.abs(top(1) - top(0)) * 0.1 : -8);
+            stress(pen, wall ? "drag " + most : "gas drag ", wall ? -upper : upper, largest, new double[] {at, y, wall ? 15 : -7});
         }
     }
 
-    private void stress(Pen pen, String name, double value, double largest, double y, double textY) {
-        double from = x(0.3);
-        double reach = 0.16 * frame.area().w() * value / largest;
+    private boolean profileToTheLeft() {
+        double sum = strip.upper().speed();
+        for (Profile.Column u : scene.assessment().profiles().traverses().columns()) {
+            if (u.key().equals("velocity")) {
+                for (double v : u.values()) {
+                    sum += v;
+                }
+            }
+        }
+        return sum < 0;
+    }
+
+    /** An arrow of the drag and its value; the place is part of the length, height and how far below its text lies [px]. */
+    private void stress(TidyPen pen, String name, double value, double largest, double[] place) {
+        double from = x(place[0]);
+        double y = place[1];
+        double reach = 0.2 * frame.area().w() * value / largest;
         Arrow.draw(pen, Stroke.of(Ink.STRESS, 2), from - reach / 2, y, from + reach / 2, y);
-        pen.text(Lettering.of(Ink.STRESS, 0), name + Show.value(value, Kind.STRESS, scene.units(), 3), from, textY);
+        pen.block(new Rect(from - Math.abs(reach) / 2, y - 4, Math.abs(reach), 8));
+        pen.note(Lettering.of(Ink.STRESS, 0), name + Show.value(value, Kind.STRESS, scene.units(), 3), from, y + place[2]);
     }
 
-    private void gravity(Pen pen) {
-        double cx = frame.area().x() + 30;
-        double cy = frame.area().y() + 20;
-        double reach = 26;
+    /** Height of the arrow that is the wall's speed, above its hatching. */
+    private double speedLine() {
+        return Math.max(frame.area().y() - 4, top(0.5) - 14);
+    }
+
+    private void wallSpeed(TidyPen pen) {
+        double speed = strip.upper().speed();
+        if (speed == 0) {
+            return;
+        }
+        double y = speedLine();
+        Arrow.draw(pen, Stroke.of(Ink.MOVING_WALL, 2.5), x(0.5), y, x(0.5) + speedScale * speed, y);
+        pen.block(new Rect(Math.min(x(0.5), x(0.5) + speedScale * speed), y - 4, Math.abs(speedScale * speed), 8));
+        String text = "wall moves " + Show.value(speed, Kind.VELOCITY, scene.units(), 3);
+        pen.note(Lettering.of(Ink.MOVING_WALL, 0).heavy(), text, x(0.5), y - 7);
+    }
+
+    /** Gravity turned into plate coordinates, in the free corner above the inlet. */
+    private void gravity(TidyPen pen) {
+        double cx = frame.area().x() + 12;
+        double cy = frame.area().y() + 4;
         double gx = Math.sin(strip.angle());
         double gy = Math.cos(strip.angle());
-        pen.disc(Ink.GRAVITY, cx, cy, 2.5, true);
-        Arrow.draw(pen, Stroke.of(Ink.GRAVITY, 2), cx, cy, cx + reach * gx, cy + reach * gy);
-        pen.text(Lettering.of(Ink.GRAVITY, 0).heavy(), "g", cx + (reach + 9) * gx, cy + (reach + 9) * gy + 4);
+        double sideways = gx < 0 ? -GRAVITY * gx : 0;
+        double tipX = cx + sideways + GRAVITY * gx;
+        double tipY = cy + GRAVITY * gy;
+        pen.disc(Ink.GRAVITY, cx + sideways, cy, 2.5, true);
+        Arrow.draw(pen, Stroke.of(Ink.GRAVITY, 2), cx + sideways, cy, tipX, tipY);
+        pen.blockLine(cx + sideways, cy, tipX, tipY, 3);
+        pen.note(Lettering.of(Ink.GRAVITY, -1).heavy(), "g", Math.max(cx + sideways, tipX) + 7, (cy + tipY) / 2 + 4);
     }
 
     /** How the picture is stretched, in words. */
@@ -185,7 +199,7 @@ final class CloseUpFigure {
                 : "drawn " + Show.number(1 / factor, 2) + " × too long";
     }
 
-    private void cursor(Pen pen) {
+    private void cursor(TidyPen pen) {
         if (scene.cursor() >= 0 && scene.cursor() <= frame.up().high()) {
             double y = frame.y(scene.cursor());
             pen.line(Stroke.dashed(Ink.CURSOR, 1), frame.area().x(), y, frame.area().right(), y);
@@ -200,23 +214,21 @@ final class CloseUpFigure {
         }
         double least = frame.up().high() / 200;
         if (!grips.depthBy().isEmpty()) {
-            list.add(new Handle(grips.depth(), grips.depthBy(), "Film surface", x(0.22), top(0.22),
+            list.add(new Handle(grips.depth(), grips.depthBy(), "Film surface", x(FILM_GRIP), top(FILM_GRIP),
                     (px, py) -> Math.max(least, frame.valueY(py))));
             return list;
         }
-        list.add(Handle.setting(grips.depth(), "Gap", x(0.1), top(0.1),
-                (px, py) -> Math.max(least, face(frame.valueY(py), strip.outletDepth(), 0.1))));
-        list.add(Handle.setting(grips.outlet(), "Gap at the outlet", x(0.9), top(0.9),
-                (px, py) -> Math.max(least, face(frame.valueY(py), strip.inletDepth(), 0.1))));
-        double y = Math.max(frame.area().y() + 2, top(0.5) - 9);
-        double scale = speedScale();
-        list.add(Handle.setting(grips.speed(), "Wall speed", x(0.5) + scale * strip.upper().speed(), y,
-                (px, py) -> Math.abs(px - x(0.5)) < 4 ? 0 : (px - x(0.5)) / scale));
+        list.add(Handle.setting(grips.depth(), "Gap", x(GRIP), top(GRIP),
+                (px, py) -> Math.max(least, face(frame.valueY(py), strip.outletDepth()))));
+        list.add(Handle.setting(grips.outlet(), "Gap at the outlet", x(1 - GRIP), top(1 - GRIP),
+                (px, py) -> Math.max(least, face(frame.valueY(py), strip.inletDepth()))));
+        list.add(Handle.setting(grips.speed(), "Wall speed", x(0.5) + speedScale * strip.upper().speed(), speedLine(),
+                (px, py) -> Math.abs(px - x(0.5)) < 4 ? 0 : (px - x(0.5)) / speedScale));
         return list;
     }
 
-    /** Depth at one end from the depth seen at a part of the way to the other. */
-    private static double face(double seen, double other, double part) {
-        return (seen - part * other) / (1 - part);
+    /** Depth at one end from the depth seen at the grip near it, the other end standing still. */
+    private static double face(double seen, double other) {
+        return (seen - GRIP * other) / (1 - GRIP);
     }
 }

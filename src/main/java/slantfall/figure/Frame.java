@@ -13,6 +13,13 @@ import slantfall.quantity.Unit;
  */
 record Frame(Rect area, Span across, Span up) {
 
+    /** Room that the horizontal axis needs below the area, with its name on two lines [px]. */
+    static final double BELOW = 46;
+
+    private static final double TICK_LINE = 17;
+    private static final double NAME_LINE = 31;
+    private static final double UNIT_LINE = 43;
+
     double x(double value) {
         return area.x() + area.w() * (value - across.low()) / across.length();
     }
@@ -30,40 +37,46 @@ record Frame(Rect area, Span across, Span up) {
     }
 
     /** Grid lines and labels of the horizontal axis, with its name below. */
-    void drawAcross(Pen pen, Unit unit, String name) {
+    void drawAcross(TidyPen pen, Unit unit, String name) {
         Ticks ticks = Ticks.of(unit.fromSi(across.low()), unit.fromSi(across.high()), (int) Math.max(3, area.w() / 48));
         Lettering small = Lettering.of(Ink.FAINT, 0);
         for (int i = 0; i < ticks.count(); i++) {
             double px = x(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), px, area.y(), px, area.bottom());
-            pen.text(small, ticks.label(i), px, area.bottom() + 17);
+            pen.text(small, ticks.label(i), px, area.bottom() + TICK_LINE);
         }
         pen.line(Stroke.of(Ink.AXIS, 1), area.x(), area.bottom(), area.right(), area.bottom());
-        pen.text(Lettering.of(Ink.TEXT, 0), fit(pen, name + ", " + unit.label(), area.w() + 20), area.midX(), area.bottom() + 31);
+        drawName(pen, name, unit.label());
+    }
+
+    /** The name of the horizontal axis, its unit on a second line where one is too long. */
+    void drawName(TidyPen pen, String name, String unit) {
+        Lettering plain = Lettering.of(Ink.TEXT, 0);
+        String whole = unit.isEmpty() ? name : name + ", " + unit;
+        if (unit.isEmpty() || pen.width(plain, whole) <= area.w() + 8) {
+            pen.note(plain, pen.fit(plain, whole, area.w() + 8), area.midX(), area.bottom() + NAME_LINE);
+        } else {
+            pen.note(plain, pen.fit(plain, name, area.w() + 8), area.midX(), area.bottom() + NAME_LINE);
+            pen.text(plain, unit, area.midX(), area.bottom() + UNIT_LINE);
+        }
     }
 
     /** Grid lines of the vertical axis, and its labels on the left if there is room for them. */
-    void drawUp(Pen pen, Unit unit, String name) {
+    void drawUp(TidyPen pen, Unit unit, String name) {
         Ticks ticks = Ticks.of(unit.fromSi(up.low()), unit.fromSi(up.high()), (int) Math.max(3, area.h() / 30));
+        Lettering small = Lettering.of(Ink.FAINT, 1);
+        double widest = 28;
         for (int i = 0; i < ticks.count(); i++) {
             double py = y(unit.toSi(ticks.at(i)));
             pen.line(Stroke.of(Ink.GRID, 1), area.x(), py, area.right(), py);
             if (!name.isEmpty()) {
-                pen.text(Lettering.of(Ink.FAINT, 1), ticks.label(i), area.x() - 5, py + 4);
+                pen.text(small, ticks.label(i), area.x() - 5, py + 4);
+                widest = Math.max(widest, pen.width(small, ticks.label(i)));
             }
         }
         if (!name.isEmpty()) {
             Lettering upright = Lettering.of(Ink.TEXT, 0).turned(90);
-            pen.text(upright, fit(pen, name + ", " + unit.label(), area.h() + 10), area.x() - 38, area.midY());
+            pen.text(upright, pen.fit(upright, name + ", " + unit.label(), area.h() + 10), area.x() - widest - 11, area.midY());
         }
-    }
-
-    private static String fit(Pen pen, String text, double room) {
-        Lettering plain = Lettering.of(Ink.TEXT, 0);
-        String cut = text;
-        while (cut.length() > 4 && pen.width(plain, cut) > room) {
-            cut = cut.substring(0, cut.length() - 2).stripTrailing() + "…";
-        }
-        return cut;
     }
 }

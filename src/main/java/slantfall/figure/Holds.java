@@ -29,6 +29,24 @@ public final class Holds {
         spans.clear();
     }
 
+    /** A place or scale that follows at rest and stands still while something is dragged. */
+    double still(String name, double wanted) {
+        Span held = spans.get(name);
+        if (dragging && held != null) {
+            return held.high();
+        }
+        spans.put(name, new Span(0, wanted));
+        return wanted;
+    }
+
+    /** A scale that follows at rest and only grows while something is dragged. */
+    double growing(String name, double wanted) {
+        Span held = spans.get(name);
+        double next = dragging && held != null ? Math.max(held.high(), wanted) : wanted;
+        spans.put(name, new Span(0, next));
+        return next;
+    }
+
     /** The stretch to draw for an axis whose data want another one. */
     Span hold(String axis, Span wanted) {
         Span held = spans.get(axis);

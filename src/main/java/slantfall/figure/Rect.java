@@ -31,6 +31,15 @@ public record Rect(double x, double y, double w, double h) {
         return new Rect(x + left, y + top, Math.max(1, w - left - rightSide), Math.max(1, h - top - below));
     }
 
+    /** Whether two rectangles cover each other. */
+    boolean meets(Rect other) {
+        return x < other.right() && other.x < right() && y < other.bottom() && other.y < bottom();
+    }
+
+    Rect moved(double dx, double dy) {
+        return new Rect(x + dx, y + dy, w, h);
+    }
+
     /** Whether a point lies inside. */
     public boolean contains(double px, double py) {
         return px >= x && px <= right() && py >= y && py <= bottom();

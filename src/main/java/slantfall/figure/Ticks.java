@@ -1,6 +1,7 @@
 package slantfall.figure;
 
 import java.util.Locale;
+import slantfall.quantity.Show;
 
 /**
  * Places of ticks on a linear axis: steps of 1, 2 or 5 times a power of ten, labels with as many decimals as the step
@@ -51,14 +52,15 @@ public record Ticks(double first, double step, int count, int decimals) {
         return Math.abs(value) < step * 1e-9 ? 0 : value;
     }
 
-    /** Its label; beyond 99999 and below 0.0001 in powers of ten. */
+    /** Its label, with the digits that the step has; in powers of ten where the step is beyond 99999 or below 0.0001. */
     public String label(int i) {
         double value = at(i);
         if (value == 0) {
             return "0";
         }
         if (step >= 1e5 || decimals > 4) {
-            return String.format(Locale.ROOT, "%.0e", value).replace("-", "−");
+            int digits = (int) Math.floor(Math.log10(Math.abs(value)) + 1e-9) - (int) Math.floor(Math.log10(step) + 1e-9) + 1;
+            return Show.number(value, Math.max(1, digits));
         }
         return String.format(Locale.ROOT, "%." + decimals + "f", value).replace('-', '−');
     }

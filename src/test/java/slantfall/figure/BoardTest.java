@@ -69,7 +69,7 @@ class BoardTest {
                 new Holds());
         assertThat(back.texts).contains("part runs back").anyMatch(t -> t.startsWith("wall "));
         RecordingPen turbulent = drawn(blank("inclined-film").with("feed", Value.of(3)), new Holds());
-        assertThat(turbulent.texts).contains("profile unknown", "unknown");
+        assertThat(turbulent.texts).contains("profile unknown", "○ unknown");
         RecordingPen dry = drawn(blank("inclined-film").with("feed", Value.of(0)), new Holds());
         assertThat(dry.texts).contains("no liquid to draw", "nothing flows");
     }
