@@ -159,7 +159,7 @@ class BenchWindowTest {
         robot.clickOn("#units-us");
         BenchFixture.settle();
         assertThat(bench.node("reading-wallShear", Label.class).getParent().toString()).isNotEmpty();
-        assertThat(bench.node("unit-length", javafx.scene.control.MenuButton.class).getText()).isEqualTo("ft");
+        assertThat(bench.node("unit-length", javafx.scene.control.Button.class).getText()).isEqualTo("ft");
         robot.clickOn("#dark");
         BenchFixture.settle();
         assertThat(bench.window.getStyleClass()).contains("dark-theme");

@@ -3,16 +3,16 @@ package slantfall.bench.form;
 import java.util.ArrayList;
 import java.util.List;
 import javafx.geometry.Pos;
+import javafx.geometry.Side;
 import javafx.scene.AccessibleAttribute;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
+import javafx.scene.control.ContextMenu;
 import javafx.scene.control.Label;
 import javafx.scene.control.Menu;
-import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
 import javafx.scene.control.Slider;
 import javafx.scene.control.TextField;
-import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseEvent;
@@ -34,7 +34,7 @@ final class FieldView extends VBox {
     private final FieldModel model;
     private final Slider slider = new Slider(0, 1, 0);
     private final TextField field = new TextField();
-    private final MenuButton unit = new MenuButton();
+    private final Button unit = new Button();
     private final Button back = new Button("↺");
     private final Label badge = Parts.label("", Mark.BADGE);
     private Object gesture;
@@ -71,17 +71,13 @@ final class FieldView extends VBox {
     private HBox head() {
         Label name = Parts.label(model.setting().name(), Mark.NAME);
         name.setLabelFor(field);
-        name.setTooltip(new Tooltip(model.setting().help()));
+        Parts.tip(name, () -> model.setting().help());
         badge.textProperty().bind(model.badgeProperty());
-        Tooltip from = new Tooltip();
-        from.textProperty().bind(model.originProperty());
-        from.setWrapText(true);
-        from.setMaxWidth(360);
-        badge.setTooltip(from);
+        Parts.tip(badge, () -> model.originProperty().get());
         back.setOnAction(e -> model.release());
         back.getStyleClass().addAll("flat", "back");
         back.setAccessibleText("Give " + model.setting().name() + " back to its default or correlation");
-        back.setTooltip(new Tooltip("Back to its default or correlation"));
+        Parts.tip(back, () -> "Back to its default or correlation");
         HBox head = new HBox(5, name, Parts.symbol(model.setting().symbol()), Parts.spring(), badge, back);
         head.setAlignment(Pos.BASELINE_LEFT);
         return head;
@@ -171,9 +167,7 @@ final class FieldView extends VBox {
         field.accessibleTextProperty().bind(model.spokenProperty());
         field.accessibleHelpProperty().bind(model.problemProperty());
         field.setPromptText("not known");
-        Tooltip tip = new Tooltip();
-        tip.setOnShowing(e -> tip.setText(model.exact()));
-        field.setTooltip(tip);
+        Parts.tip(field, model::exact);
     }
 
     private void endRun(boolean focused) {
@@ -203,8 +197,14 @@ final class FieldView extends VBox {
         showUnit(model.unitProperty().get());
         unit.getStyleClass().add("unit-button");
         unit.setVisible(model.setting().kind().units().size() > 1);
-        unit.setOnShowing(e -> unit.getItems().setAll(meanings()));
-        unit.getItems().add(new MenuItem(""));
+        unit.setOnAction(e -> openUnits());
+    }
+
+    /** The menu is made when it is asked for: one for each field at the start would hold it up. */
+    private void openUnits() {
+        ContextMenu menu = new ContextMenu();
+        menu.getItems().setAll(meanings());
+        menu.show(unit, Side.BOTTOM, 0, 0);
     }
 
     private void showUnit(Unit u) {

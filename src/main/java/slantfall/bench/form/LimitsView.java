@@ -10,10 +10,10 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
 import javafx.scene.control.TextField;
-import javafx.scene.control.TitledPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
+import slantfall.bench.look.LazyPane;
 import slantfall.bench.look.Mark;
 import slantfall.bench.look.Parts;
 import slantfall.declare.CheckInfo;
@@ -23,7 +23,7 @@ final class LimitsView extends VBox {
 
     private final LimitsModel model;
     private final VBox requirements = new VBox(8);
-    private final VBox houseRules = new VBox(8);
+    private final LazyPane house = new LazyPane("Rules to design by", this::houseRules);
 
     LimitsView(LimitsModel model) {
         super(8);
@@ -37,16 +37,11 @@ final class LimitsView extends VBox {
             item.setOnAction(a -> model.add(r));
             return item;
         }).toList()));
-        TitledPane house = new TitledPane("Rules to design by", houseRules);
-        house.setExpanded(false);
-        house.setAnimated(false);
         house.setId("house-rules");
-        house.getStyleClass().addAll("dense", "more");
         getChildren().addAll(requirements, add, house);
         model.requirements().addListener((ListChangeListener<RequirementModel>) c -> buildRequirements());
-        model.houseRules().addListener((ListChangeListener<HouseRuleModel>) c -> buildHouse());
+        model.houseRules().addListener((ListChangeListener<HouseRuleModel>) c -> house.forget());
         buildRequirements();
-        buildHouse();
     }
 
     private void buildRequirements() {
@@ -54,8 +49,10 @@ final class LimitsView extends VBox {
         requirements.setManaged(!model.requirements().isEmpty());
     }
 
-    private void buildHouse() {
-        houseRules.getChildren().setAll(model.houseRules().stream().map(LimitsView::house).toList());
+    private VBox houseRules() {
+        VBox box = new VBox(8);
+        box.getChildren().setAll(model.houseRules().stream().map(LimitsView::house).toList());
+        return box;
     }
 
     private Node requirement(RequirementModel r) {

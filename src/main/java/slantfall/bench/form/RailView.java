@@ -10,10 +10,9 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
-import javafx.scene.control.TitledPane;
-import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
+import slantfall.bench.look.LazyPane;
 import slantfall.bench.look.Mark;
 import slantfall.bench.look.Parts;
 import slantfall.declare.Choice;
@@ -25,6 +24,7 @@ public final class RailView extends ScrollPane {
     private final RailModel model;
     private final VBox content = new VBox(10);
     private final Map<String, FieldView> views = new HashMap<>();
+    private final Map<String, LazyPane> folded = new HashMap<>();
     private final LiquidView liquid;
     private final LimitsView limits;
 
@@ -51,17 +51,15 @@ public final class RailView extends ScrollPane {
 
     /** Puts the keyboard into the field of a setting; false if there is none. */
     public boolean focus(String key) {
-        if (!views.containsKey(key)) {
+        if (!views.containsKey(key) && !folded.containsKey(key)) {
             model.startingProperty().set(false);
+        }
+        if (folded.containsKey(key)) {
+            folded.get(key).setExpanded(true);
         }
         FieldView view = views.get(key);
         if (view == null) {
             return false;
-        }
-        for (Node n = view; n != null; n = n.getParent()) {
-            if (n instanceof TitledPane pane) {
-                pane.setExpanded(true);
-            }
         }
         applyCss();
         layout();
@@ -85,6 +83,7 @@ public final class RailView extends ScrollPane {
 
     private void build() {
         views.clear();
+        folded.clear();
         if (model.startingProperty().get()) {
             content.getChildren().setAll(group("To begin with", box(liquid, rows(model.essentials()), all())));
             return;
@@ -135,15 +134,13 @@ public final class RailView extends ScrollPane {
     }
 
     private Node more(RailModel.Group group) {
-        VBox rows = rows(group);
-        if (rows.getChildren().isEmpty()) {
-            return rows;
+        List<FieldModel> fields = model.fields(group);
+        if (fields.isEmpty()) {
+            return new VBox();
         }
-        TitledPane pane = new TitledPane(group.title(), rows);
-        pane.setExpanded(false);
-        pane.setAnimated(false);
-        pane.getStyleClass().addAll("dense", "more");
+        LazyPane pane = new LazyPane(group.title(), () -> rows(fields));
         pane.setId("more-" + group.name().toLowerCase(java.util.Locale.ROOT));
+        fields.forEach(f -> folded.put(f.setting().key(), pane));
         return pane;
     }
 
@@ -163,7 +160,7 @@ public final class RailView extends ScrollPane {
         combo.setAccessibleText(choice.name());
         Label name = Parts.label(choice.name(), Mark.NAME);
         name.setLabelFor(combo);
-        name.setTooltip(new Tooltip(choice.help()));
+        Parts.tip(name, () -> choice.help());
         combo.valueProperty().bindBidirectional(own.optionProperty());
         Label badge = Parts.label("", Mark.BADGE);
         badge.textProperty().bind(own.badgeProperty());

@@ -1,8 +1,13 @@
 package slantfall.bench.look;
 
+import java.util.function.Supplier;
 import javafx.beans.value.ObservableValue;
+import javafx.event.EventHandler;
 import javafx.scene.Node;
+import javafx.scene.control.Control;
 import javafx.scene.control.Label;
+import javafx.scene.control.Tooltip;
+import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
@@ -41,6 +46,25 @@ public final class Parts {
         label.setWrapText(false);
         label.setMinWidth(0);
         return label;
+    }
+
+    /**
+     * Words that appear while the pointer rests on a control. The little window is made when the pointer first comes, for
+     * dozens of them made at the start would hold it up.
+     */
+    public static void tip(Control control, Supplier<String> words) {
+        EventHandler<MouseEvent> first = new EventHandler<>() {
+            @Override
+            public void handle(MouseEvent e) {
+                control.removeEventHandler(MouseEvent.MOUSE_ENTERED, this);
+                Tooltip tip = new Tooltip(words.get());
+                tip.setWrapText(true);
+                tip.setMaxWidth(360);
+                tip.setOnShowing(shown -> tip.setText(words.get()));
+                control.setTooltip(tip);
+            }
+        };
+        control.addEventHandler(MouseEvent.MOUSE_ENTERED, first);
     }
 
     /** Takes the room that is left in a row. */

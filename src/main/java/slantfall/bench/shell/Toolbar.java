@@ -13,10 +13,10 @@ import javafx.scene.control.SeparatorMenuItem;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
-import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
+import slantfall.bench.look.Parts;
 import slantfall.bench.look.Theme;
 import slantfall.bench.model.Desk;
 import slantfall.quantity.UnitSystem;
@@ -56,7 +56,7 @@ final class Toolbar extends HBox {
         button.setId(id);
         button.setMinWidth(USE_PREF_SIZE);
         button.setOnAction(e -> action.run());
-        button.setTooltip(new Tooltip(words + " (" + keys + ")"));
+        Parts.tip(button, () -> words + " (" + keys + ")");
         button.setAccessibleText(words);
         return button;
     }
@@ -64,7 +64,7 @@ final class Toolbar extends HBox {
     private Node undo() {
         Button undo = button("↶", "undo", "Ctrl+Z", desk.session()::undo);
         undo.setAccessibleText("Undo");
-        undo.setTooltip(new Tooltip("Undo (Ctrl+Z)"));
+        Parts.tip(undo, () -> "Undo (Ctrl+Z)");
         undo.disableProperty().bind(desk.canUndoProperty().not());
         return undo;
     }
@@ -72,7 +72,7 @@ final class Toolbar extends HBox {
     private Node redo() {
         Button redo = button("↷", "redo", "Ctrl+Y", desk.session()::redo);
         redo.setAccessibleText("Redo");
-        redo.setTooltip(new Tooltip("Redo (Ctrl+Y)"));
+        Parts.tip(redo, () -> "Redo (Ctrl+Y)");
         redo.disableProperty().bind(desk.canRedoProperty().not());
         return redo;
     }
@@ -152,7 +152,7 @@ final class Toolbar extends HBox {
             button.setToggleGroup(group);
             button.setMinWidth(USE_PREF_SIZE);
             button.setAccessibleText("Show numbers in " + system.words() + " units");
-            button.setTooltip(new Tooltip("Show numbers in " + system.words() + " units; no value changes"));
+            Parts.tip(button, () -> "Show numbers in " + system.words() + " units; no value changes");
             button.getStyleClass().add(switch (system) {
                 case SI -> "left-pill";
                 case TRADE -> "center-pill";
