@@ -122,6 +122,33 @@ class FiguresTest {
         assertThat(texts(Figures::closeUp, scene("slot"))).noneMatch(t -> t.contains("back"));
     }
 
+    /** A name may be cut short in a small picture, its unit never. */
+    @Test
+    void unitsStandInTheSmallestPicture() {
+        for (String name : names()) {
+            RecordingPen pen = new RecordingPen();
+            Board.draw(pen, new Rect(0, 0, 480, 440), scene(name));
+            assertThat(pen.texts).as(name).noneMatch(t -> t.matches("(Pres|Velo|Shear|Gap|from|along).*, ?…"));
+            assertThat(pen.texts).as(name).anyMatch(t -> t.matches("from the.*, (m|mm|μm|µm)"));
+        }
+    }
+
+    /** Arrows in a slot that narrows to a quarter end before its wall. */
+    @Test
+    void theProfileStaysInsideASlopingWall() {
+        RecordingPen pen = new RecordingPen();
+        Scene scene = scene("slot, taper");
+        Figures.closeUp(pen, AREA, scene);
+        List<RecordingPen.Mark> curve = pen.marks.stream().filter(m -> m.what().equals("polyline")).toList();
+        double left = pen.marks.stream().filter(m -> m.ink() == Ink.LIQUID).mapToDouble(RecordingPen.Mark::x).min().orElseThrow();
+        double right = pen.marks.stream().filter(m -> m.ink() == Ink.LIQUID).mapToDouble(RecordingPen.Mark::x).max().orElseThrow();
+        double[] tops = pen.marks.stream().filter(m -> m.ink() == Ink.LIQUID).mapToDouble(RecordingPen.Mark::y).sorted().toArray();
+        for (RecordingPen.Mark m : curve) {
+            double here = tops[0] + (tops[1] - tops[0]) * (m.x() - left) / (right - left);
+            assertThat(m.y()).isGreaterThanOrEqualTo(here - 1.5);
+        }
+    }
+
     /** Drags the plate to and fro: the outlet and so the meaning of the pointer stand still, and nothing leaves the paper. */
     @Test
     void theOutletStandsStillWhileTheAngleIsDragged() {
