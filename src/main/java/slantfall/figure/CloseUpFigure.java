@@ -178,9 +178,10 @@ final class CloseUpFigure {
         pen.block(new Rect(from - Math.abs(reach) / 2, y - 4, Math.abs(reach), 8));
         Lettering lettering = Lettering.of(Ink.STRESS, 0);
         String number = Show.value(value, Kind.STRESS, scene.units(), 3);
-        boolean written = pen.beside(lettering, name + number, from, y + place[2]) || pen.beside(lettering, number, from, y + place[2]);
+        String brief = (strip.inletDepth() == strip.outletDepth() ? "" : "max ") + number;
+        boolean written = pen.beside(lettering, name + number, from, y + place[2]) || pen.beside(lettering, brief, from, y + place[2]);
         if (!written) {
-            pen.note(lettering, number, from, y + place[2]);
+            pen.note(lettering, brief, from, y + place[2]);
         }
     }
 
