@@ -44,11 +44,6 @@ record Backflow(double[] y, double[] u, double forward) {
         return y[worst()];
     }
 
-    /** The velocity there [m/s]. */
-    double fastest() {
-        return u[worst()];
-    }
-
     private int worst() {
         int worst = 0;
         for (int i = 1; i < u.length; i++) {

@@ -20,6 +20,8 @@ final class CloseUpFigure {
     private static final double GRIP = 0.1;
     private static final double FILM_GRIP = 0.22;
     private static final double GRAVITY = 22;
+    /** Longest velocity arrow as a part of the width. */
+    private static final double LONGEST = 0.4;
 
     private final Scene scene;
     private final Strip strip;
@@ -47,10 +49,14 @@ final class CloseUpFigure {
         frame.drawUp(pen, Display.unit(Kind.LENGTH, scene.units(), frame.up().high()), "from the wall");
         frame.drawAcross(pen, Display.unit(Kind.LENGTH, scene.units(), frame.across().high()), "along the flow");
         pen.clip(new Rect(area.x() - 1, area.y() - 10, area.w() + 2, area.h() + 20));
+        pen = pen.within(new Rect(area.x() + 1, area.y() - 10, area.w() - 2, area.h() + 10));
         liquid(pen);
         walls(pen);
-        handles.forEach(h -> pen.block(new Rect(h.x() - 7, h.y() - 7, 14, 14)));
+        for (Handle h : handles) {
+            pen.block(new Rect(h.x() - 7, h.y() - 7, 14, 14));
+        }
         cursor(pen);
+        gravity(pen);
         if (strip.filled()) {
             new CloseUpProfile(scene, strip, frame, speedScale).draw(pen);
             stresses(pen);
@@ -58,7 +64,6 @@ final class CloseUpFigure {
         } else {
             pen.note(Lettering.of(Ink.TEXT, 0), "no liquid to draw", area.midX(), area.midY());
         }
-        gravity(pen);
         pen.unclip();
         return handles;
     }
@@ -102,7 +107,7 @@ final class CloseUpFigure {
         }
     }
 
-    /** Pixels per speed; the fastest arrow takes two fifths of the width. */
+    /** Pixels per speed; the fastest arrow takes two fifths of the width, less where a sloping wall would be crossed. */
     private double speedScale() {
         Profile.Column u = scene.assessment().profiles().traverses().column("velocity").orElse(null);
         double largest = Math.abs(strip.upper().speed());
@@ -112,7 +117,24 @@ final class CloseUpFigure {
             }
         }
         double held = scene.holds().hold("closeup.speed", new Span(0, Math.max(largest, 1e-12))).high();
-        return 0.4 * frame.area().w() / held;
+        return LONGEST * frame.area().w() * (u == null ? 1 : inside(u.values(), LONGEST / held)) / held;
+    }
+
+    /** By which factor arrows must be shorter to end before a wall that slopes; not for a wall that moves, nor below a half. */
+    private double inside(double[] u, double perSpeed) {
+        double slope = strip.outletDepth() - strip.inletDepth();
+        if (slope == 0 || strip.upper().speed() != 0) {
+            return 1;
+        }
+        double[] y = scene.assessment().profiles().traverses().axis().values();
+        double factor = 1;
+        for (int i = 0; i < y.length; i++) {
+            double free = (y[i] - strip.depth(0.5)) / slope;
+            if (u[i] * free > 0) {
+                factor = Math.min(factor, free / (u[i] * perSpeed));
+            }
+        }
+        return Math.max(0.5, factor);
     }
 
     private void stresses(TidyPen pen) {
@@ -154,7 +176,13 @@ final class CloseUpFigure {
         double reach = 0.2 * frame.area().w() * value / largest;
         Arrow.draw(pen, Stroke.of(Ink.STRESS, 2), from - reach / 2, y, from + reach / 2, y);
         pen.block(new Rect(from - Math.abs(reach) / 2, y - 4, Math.abs(reach), 8));
-        pen.note(Lettering.of(Ink.STRESS, 0), name + Show.value(value, Kind.STRESS, scene.units(), 3), from, y + place[2]);
+        Lettering lettering = Lettering.of(Ink.STRESS, 0);
+        String number = Show.value(value, Kind.STRESS, scene.units(), 3);
+        String brief = (strip.inletDepth() == strip.outletDepth() ? "" : "max ") + number;
+        boolean written = pen.beside(lettering, name + number, from, y + place[2]) || pen.beside(lettering, brief, from, y + place[2]);
+        if (!written) {
+            pen.note(lettering, brief, from, y + place[2]);
+        }
     }
 
     /** Height of the arrow that is the wall's speed, above its hatching. */

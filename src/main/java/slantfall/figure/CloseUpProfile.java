@@ -41,7 +41,6 @@ final class CloseUpProfile {
             double y = frame.y(back.middle()) + 4;
             boolean left = scene.forward() > 0;
             double base = frame.x(0.5 * strip.length());
-            pen.blockLine(base, y - 4, base + scale * back.fastest(), y - 4, 3);
             pen.slip(Lettering.of(Ink.REVERSED, left ? 1 : -1).heavy(), what, base + (left ? -8 : 8), y + 12);
         }
     }
@@ -60,6 +59,7 @@ final class CloseUpProfile {
             int i = k * (y.length - 1) / ARROWS;
             Ink ink = back.against(u[i]) ? Ink.REVERSED : Ink.VELOCITY;
             Arrow.draw(pen, Stroke.of(ink, 1.3), base, py[i], px[i], py[i]);
+            pen.block(new Rect(Math.min(base, px[i]), py[i] - 2, Math.abs(px[i] - base), 4));
         }
         pen.polyline(Stroke.of(Ink.VELOCITY, 2), px, py, y.length);
     }

@@ -61,6 +61,14 @@ record Frame(Rect area, Span across, Span up) {
         }
     }
 
+    /** The name with its unit; where there is no room the name is cut and the unit kept. */
+    private String withUnit(TidyPen pen, String name, String unit) {
+        Lettering plain = Lettering.of(Ink.TEXT, 0);
+        String end = unit.isEmpty() ? "" : ", " + unit;
+        double room = area.h() + 20;
+        return pen.fit(plain, name, room - pen.width(plain, end)) + end;
+    }
+
     /** Grid lines of the vertical axis, and its labels on the left if there is room for them. */
     void drawUp(TidyPen pen, Unit unit, String name) {
         Ticks ticks = Ticks.of(unit.fromSi(up.low()), unit.fromSi(up.high()), (int) Math.max(3, area.h() / 30));
@@ -76,7 +84,7 @@ record Frame(Rect area, Span across, Span up) {
         }
         if (!name.isEmpty()) {
             Lettering upright = Lettering.of(Ink.TEXT, 0).turned(90);
-            pen.text(upright, pen.fit(upright, name + ", " + unit.label(), area.h() + 10), area.x() - widest - 11, area.midY());
+            pen.text(upright, withUnit(pen, name, unit.label()), area.x() - widest - 11, area.midY());
         }
     }
 }

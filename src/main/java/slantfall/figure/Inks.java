@@ -30,7 +30,7 @@ final class Inks {
      * @param place x, y, radius [px]
      */
     static void mark(Pen pen, Verdict verdict, boolean full, double[] place) {
-        Ink ink = of(verdict);
+        Ink ink = full ? of(verdict) : Ink.FAINT;
         double x = place[0];
         double y = place[1];
         double r = place[2];

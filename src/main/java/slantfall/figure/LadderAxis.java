@@ -108,6 +108,11 @@ record LadderAxis(Mode mode, Kind kind, double low, double high) {
         }
     }
 
+    /** Whether the ends of a margin axis stand for all that lies beyond. */
+    boolean full() {
+        return mode == Mode.MARGIN && high >= MOST_MARGIN;
+    }
+
     /** Whether a rule is clear on the left of its limit. */
     boolean clearOnTheLeft(CheckResult r) {
         return mode != Mode.MARGIN && r.info().side() == Side.AT_MOST;

@@ -19,9 +19,9 @@ import slantfall.quantity.UnitSystem;
 public final class LadderFigure {
 
     private static final double ROW = 34;
-    private static final double HEAD = 26;
+    private static final double HEAD = 38;
     private static final double FOOT = 44;
-    private static final double VERDICT = 78;
+    private static final double VERDICT = 92;
     private static final double NAMES = 0.4;
     private static final double MOST_NAMES = 240;
     private static final double MARK = 5;
@@ -113,7 +113,7 @@ public final class LadderFigure {
             case RATIO:
                 return "value over limit";
             default:
-                return "margin, 0 at the limit, clear to the right";
+                return "margin, 0 at the limit, clear to the right" + (axis.full() ? "; ends mean more" : "");
         }
     }
 
@@ -126,7 +126,7 @@ public final class LadderFigure {
         String second = r.inRange() ? r.info().formula() : "outside its range; " + r.info().formula();
         pen.text(small, pen.fit(small, second, room), row.x() + 6, row.midY() + 12);
         pen.line(Stroke.of(Ink.GRID, 1), row.x() + 6, row.bottom(), row.right() - 6, row.bottom());
-        Lettering verdict = Lettering.of(Inks.of(r.verdict()), -1).heavy();
+        Lettering verdict = r.inRange() ? Lettering.of(Inks.of(r.verdict()), -1).heavy() : small;
         pen.text(verdict, r.verdict().shape() + " " + r.verdict().word(), scale.right() + 12, row.midY() + 4);
         if (LadderAxis.known(r)) {
             rule(pen, row, scale, r);
@@ -157,7 +157,7 @@ public final class LadderFigure {
         double at = axis.value(first);
         double px = x(scale, at);
         pen.line(Stroke.of(Ink.CURSOR, 1.5), px, scale.y(), px, scale.bottom());
-        String text = "here " + Show.value(at, axis.kind(), units, 3);
-        pen.slip(Lettering.of(Ink.TEXT, 0).heavy(), text, px, scale.bottom() - 4);
+        String text = "this set-up " + Show.value(at, axis.kind(), units, 3);
+        pen.note(Lettering.of(Ink.TEXT, 0).heavy(), text, px, scale.y() - 4);
     }
 }

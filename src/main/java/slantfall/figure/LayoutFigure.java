@@ -114,8 +114,11 @@ final class LayoutFigure {
         } else if (strip.filled()) {
             pen.line(Stroke.of(Ink.LIQUID_EDGE, 1), px(up, a), py(up, a), px(0, b), py(0, b));
         }
-        double half = 0.5 * Math.max(a, b) + 4;
-        pen.blockLine(px(up, half - 4), py(up, half - 4), px(0, half - 4), py(0, half - 4), half);
+        int lines = (int) Math.min(8, 1 + Math.max(a, b) / 8);
+        for (int i = 0; i <= lines; i++) {
+            double part = (double) i / lines;
+            pen.blockLine(px(up, part * a), py(up, part * a), px(0, part * b), py(0, part * b), 4);
+        }
         for (Handle h : handles()) {
             pen.block(new Rect(h.x() - 8, h.y() - 8, 16, 16));
         }

@@ -72,10 +72,10 @@ public final class SvgPen implements Pen {
         body.append('>').append(escape(text)).append("</text>\n");
     }
 
-    /** An estimate from the mean width of a sans-serif letter; good enough to keep labels apart. */
+    /** An estimate, on the wide side: a file is opened with fonts that are not known here. */
     @Override
     public double width(Lettering l, String text) {
-        return text.length() * l.size() * (l.bold() ? 0.6 : 0.55);
+        return Letters.width(text, l.size(), l.bold());
     }
 
     @Override
@@ -109,6 +109,27 @@ public final class SvgPen implements Pen {
     }
 
     private static String escape(String text) {
-        return text.replace("&", "&amp;").replace("<", "&lt;").replace(">", "&gt;");
+        StringBuilder escaped = new StringBuilder();
+        text.codePoints().filter(SvgPen::allowed).forEach(c -> {
+            switch (c) {
+                case '&':
+                    escaped.append("&amp;");
+                    break;
+                case '<':
+                    escaped.append("&lt;");
+                    break;
+                case '>':
+                    escaped.append("&gt;");
+                    break;
+                default:
+                    escaped.appendCodePoint(c);
+            }
+        });
+        return escaped.toString();
+    }
+
+    /** Characters that XML 1.0 may hold (W3C 2008, section 2.2). */
+    private static boolean allowed(int c) {
+        return c == '\t' || c == '\n' || c == '\r' || c >= 0x20 && c <= 0xD7FF || c >= 0xE000 && c <= 0xFFFD || c >= 0x10000;
     }
 }
