@@ -77,7 +77,7 @@ public final class BenchTicks {
         stage.hide();
     }
 
-    private static Chooser nobody() {
+    static Chooser nobody() {
         return new Chooser() {
             @Override
             public Optional<Path> open() {
