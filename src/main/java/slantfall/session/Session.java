@@ -22,6 +22,8 @@ public final class Session {
 
     private final History<SetUp> history;
     private final List<Consumer<SetUp>> listeners = new ArrayList<>();
+    private final List<Runnable> settled = new ArrayList<>();
+    private boolean running;
     private SetUp saved;
     private Path file;
     private FileStamp stamp;
@@ -90,19 +92,38 @@ public final class Session {
             return;
         }
         history.record(next, gesture);
+        running = gesture != null;
         changed();
+        settleIfAtRest();
     }
 
     /** Ends a drag or a run of keys. */
     public void endGesture() {
         history.endGesture();
+        if (running) {
+            running = false;
+            settleIfAtRest();
+        }
+    }
+
+    /** Tells whenever a change is committed: a typed value, the end of a drag, an undo; not at every tick of a drag. */
+    public void onSettled(Runnable listener) {
+        settled.add(listener);
+    }
+
+    private void settleIfAtRest() {
+        if (!running) {
+            List.copyOf(settled).forEach(Runnable::run);
+        }
     }
 
     /** One step back, if there is one. */
     public void undo() {
         if (history.canUndo()) {
             history.undo();
+            running = false;
             changed();
+            settleIfAtRest();
         }
     }
 
@@ -110,7 +131,9 @@ public final class Session {
     public void redo() {
         if (history.canRedo()) {
             history.redo();
+            running = false;
             changed();
+            settleIfAtRest();
         }
     }
 

@@ -31,6 +31,7 @@ public final class FileLife {
     private final Notices notices;
     private final Scheduler work;
     private final Session session;
+    private final Keeper keeper;
 
     /**
      * Files of a desk.
@@ -45,7 +46,9 @@ public final class FileLife {
         this.notices = notices;
         this.work = work;
         this.session = desk.session();
+        this.keeper = new Keeper(disk);
         session.listen(s -> keep());
+        session.onSettled(this::keepNow);
     }
 
     /** Unsaved work of last time, else the last file, else the first example. */
@@ -227,12 +230,19 @@ public final class FileLife {
 
     /** Keeps what is not saved, the newest only; while a drag runs the ones between are passed over. */
     private void keep() {
-        if (session.dirty()) {
-            SetUp now = session.current();
-            Path file = session.file();
-            behind(KEEP, () -> disk.keep(now, file));
-        } else {
-            behind(KEEP, disk::forget);
+        SetUp now = session.current();
+        Path file = session.file();
+        boolean dirty = session.dirty();
+        long version = session.version();
+        behind(KEEP, () -> keeper.keep(version, dirty ? now : null, file));
+    }
+
+    /** Keeps a committed edit before anything else happens, so that a kill at any later moment finds it. */
+    private void keepNow() {
+        try {
+            keeper.keep(session.version(), session.dirty() ? session.current() : null, session.file());
+        } catch (RuntimeException e) {
+            notices.problem(said(e));
         }
     }
 
