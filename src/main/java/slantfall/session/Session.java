@@ -111,6 +111,11 @@ public final class Session {
         settled.add(listener);
     }
 
+    /** Whether a drag or a run of keys is under way. */
+    public boolean inGesture() {
+        return running;
+    }
+
     private void settleIfAtRest() {
         if (!running) {
             List.copyOf(settled).forEach(Runnable::run);

@@ -18,6 +18,7 @@ import slantfall.declare.SetUp;
 import slantfall.declare.Value;
 import slantfall.liquid.Preset;
 import slantfall.liquid.Property;
+import slantfall.liquid.ViscosityFit;
 
 /** Which liquid. Another liquid lets go what was measured on the former one; undo brings it back. */
 public final class LiquidModel {
@@ -26,6 +27,7 @@ public final class LiquidModel {
     private final Supplier<List<Preset>> presets;
     private final ObjectProperty<Optional<Preset>> preset = new SimpleObjectProperty<>(Optional.empty());
     private final ReadOnlyStringWrapper note = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper fit = new ReadOnlyStringWrapper("");
     private boolean showing;
 
     /** Follows a desk. */
@@ -58,7 +60,41 @@ public final class LiquidModel {
         return note.getReadOnlyProperty();
     }
 
+    /** Which law runs through the measured points, empty if there are none. */
+    public ReadOnlyStringProperty fitProperty() {
+        return fit.getReadOnlyProperty();
+    }
+
+    /** The measured points, one a line. */
+    String pointsAsTyped() {
+        return desk.session().current().base().typedPoints().stream()
+                .map(p -> String.join("   ", p))
+                .collect(Collectors.joining("\n"));
+    }
+
+    /**
+     * Takes measured points; a viscosity typed as one number goes, it would win over them.
+     *
+     * @throws RuntimeException with what to change, nothing is taken then
+     */
+    void takePoints(String table, String temperatureUnit, String viscosityUnit) {
+        PastedPoints pasted = PastedPoints.read(table, temperatureUnit, viscosityUnit, desk.context());
+        ViscosityFit through = ViscosityFit.automatic(pasted.points());
+        SetUp from = desk.session().current();
+        LiquidBase base = new LiquidBase(from.base().preset(), through, pasted.typed(), "");
+        desk.session().change(from.without(Declaration.LIQUID + Property.VISCOSITY.key()).withBase(base), null);
+    }
+
+    /** Lets the measured points go. */
+    void dropPoints() {
+        SetUp from = desk.session().current();
+        desk.session().change(from.withBase(new LiquidBase(from.base().preset(), null, List.of(), "")), null);
+    }
+
     private void refresh(Assessment assessment) {
+        ViscosityFit points = assessment.setUp().base().points();
+        fit.set(points == null ? "" : "Viscosity: " + points.words());
+
         Optional<Preset> now = Optional.ofNullable(assessment.setUp().base().preset());
         showing = true;
         if (!now.map(Preset::key).equals(preset.get() == null ? null : preset.get().map(Preset::key))) {

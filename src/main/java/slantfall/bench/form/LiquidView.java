@@ -3,6 +3,7 @@ package slantfall.bench.form;
 import java.util.Optional;
 import javafx.scene.control.ComboBox;
 import javafx.scene.layout.VBox;
+import slantfall.bench.look.LazyPane;
 import slantfall.bench.look.Mark;
 import slantfall.bench.look.Parts;
 import slantfall.liquid.Preset;
@@ -26,6 +27,8 @@ final class LiquidView extends VBox {
             }
         });
         combo.valueProperty().bindBidirectional(model.presetProperty());
-        getChildren().addAll(combo, Parts.line(model.noteProperty(), Mark.MUTED));
+        LazyPane points = new LazyPane("Viscosity measured at several temperatures", () -> new PointsView(model));
+        points.setId("more-points");
+        getChildren().addAll(combo, Parts.line(model.noteProperty(), Mark.MUTED), points);
     }
 }

@@ -19,7 +19,9 @@ import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import slantfall.bench.look.Mark;
 import slantfall.bench.look.Parts;
+import slantfall.bench.look.Theme;
 import slantfall.bench.model.Desk;
+import slantfall.bench.plot.LadderPicture;
 
 /** Readings, the user's own rules, questions with their authors, cautions and notices. */
 public final class LedgerView extends ScrollPane {
@@ -27,7 +29,10 @@ public final class LedgerView extends ScrollPane {
     /** Questions shown where there is little room. */
     private static final int BRIEF = 3;
 
+    private final Desk desk;
+    private final Theme theme;
     private final LedgerModel model;
+    private final Map<String, LadderPicture> ladders = new HashMap<>();
     private final VBox readings = new VBox();
     private final VBox checks = new VBox(2);
     private final VBox words = new VBox(6);
@@ -35,7 +40,9 @@ public final class LedgerView extends ScrollPane {
     private final Map<String, Opening> rows = new HashMap<>();
 
     /** A ledger. */
-    public LedgerView(Desk desk, LedgerModel model) {
+    public LedgerView(Desk desk, LedgerModel model, Theme theme) {
+        this.desk = desk;
+        this.theme = theme;
         this.model = model;
         setId("ledger");
         setFitToWidth(true);
@@ -54,7 +61,10 @@ public final class LedgerView extends ScrollPane {
         buildChecks();
         buildWords();
         arrange();
-        desk.follow(a -> rows.values().forEach(Opening::renew));
+        desk.follow(a -> {
+            rows.values().forEach(Opening::renew);
+            ladders.values().forEach(LadderPicture::renew);
+        });
     }
 
     /** Opens the row of a reading, check or panel and puts the keyboard there; false if there is none. */
@@ -187,6 +197,11 @@ public final class LedgerView extends ScrollPane {
     private Node authors(PanelRow row) {
         VBox box = new VBox(2);
         box.getStyleClass().add("authors");
+        if (row.authors().size() > 1) {
+            LadderPicture ladder = new LadderPicture(desk, theme, row.panel().key());
+            ladders.put(row.panel().key(), ladder);
+            box.getChildren().add(ladder);
+        }
         row.authors().forEach(author -> box.getChildren().add(check(author, row.regime())));
         return box;
     }

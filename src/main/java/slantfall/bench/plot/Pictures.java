@@ -1,5 +1,15 @@
 package slantfall.bench.plot;
 
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Locale;
+import javafx.embed.swing.SwingFXUtils;
+import javafx.scene.SnapshotParameters;
+import javafx.scene.transform.Transform;
+import javax.imageio.ImageIO;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Cursor;
 import javafx.scene.Node;
@@ -21,6 +31,7 @@ import slantfall.figure.Holds;
 import slantfall.figure.Palette;
 import slantfall.figure.Rect;
 import slantfall.figure.Scene;
+import slantfall.figure.SvgPen;
 
 /** The pictures of the open set-up: what can be dragged is dragged here, and the pointer reads the traverses. */
 public final class Pictures extends Pane {
@@ -54,6 +65,7 @@ public final class Pictures extends Pane {
         });
         takePen();
         desk.follow(this::changed);
+        desk.session().onSettled(() -> changed(desk.assessment()));
         desk.cursorProperty().addListener((o, a, b) -> draw());
         wire();
     }
@@ -87,6 +99,36 @@ public final class Pictures extends Pane {
         return small;
     }
 
+    /**
+     * Saves what is shown: as SVG in the colours of paper, or as PNG at twice the size if the name ends so.
+     *
+     * @throws UncheckedIOException if it cannot be written
+     */
+    public void save(Path path) {
+        try {
+            if (path.toString().toLowerCase(Locale.ROOT).endsWith(".png")) {
+                SnapshotParameters twice = new SnapshotParameters();
+                twice.setTransform(Transform.scale(2, 2));
+                BufferedImage image = SwingFXUtils.fromFXImage(canvas.snapshot(twice, null), null);
+                ImageIO.write(image, "png", path.toFile());
+            } else {
+                SvgPen svg = new SvgPen(canvas.getWidth(), canvas.getHeight(), Palette.PAPER.colours());
+                Board.draw(svg, area(), scene());
+                Files.writeString(path, svg.text());
+            }
+        } catch (IOException e) {
+            throw new UncheckedIOException(path.getFileName() + " cannot be written; choose another folder.", e);
+        }
+    }
+
+    private Rect area() {
+        return new Rect(8, 4, canvas.getWidth() - 16, canvas.getHeight() - 12);
+    }
+
+    private Scene scene() {
+        return new Scene(desk.assessment(), desk.unitsProperty().get(), holds, desk.cursorProperty().get());
+    }
+
     /** Puts the keyboard here. */
     public void focusFirst() {
         requestFocus();
@@ -102,6 +144,8 @@ public final class Pictures extends Pane {
             arrangement = assessment.declaration().key();
             holds.clear();
         }
+        // A slider of the rail that is dragged holds the axes still as a handle does.
+        holds.setDragging(dragged != null || desk.session().inGesture());
         draw();
     }
 
@@ -112,8 +156,7 @@ public final class Pictures extends Pane {
             return;
         }
         pen.blank(w, h);
-        drawn = Board.draw(pen, new Rect(8, 4, w - 16, h - 12),
-                new Scene(desk.assessment(), desk.unitsProperty().get(), holds, desk.cursorProperty().get()));
+        drawn = Board.draw(pen, area(), scene());
         setAccessibleText("Layout, close-up and traverses. " + CursorWords.of(desk));
     }
 

@@ -48,7 +48,7 @@ public final class BenchWindow extends StackPane {
         railModel = new RailModel(desk);
         rail = new RailView(railModel, disk::presets);
         LedgerModel ledgerModel = new LedgerModel(desk);
-        ledger = new LedgerView(desk, ledgerModel);
+        ledger = new LedgerView(desk, ledgerModel, theme);
         pictures = new Pictures(desk, theme);
         columns = new Columns(rail, pictures, ledger,
                 layout -> ledgerModel.briefProperty().set(layout == Columns.Layout.TWO_COLUMNS));
@@ -57,7 +57,7 @@ public final class BenchWindow extends StackPane {
                 a -> pictures.card(a.assess(SetUp.blank(a.key(), base(disk)))),
                 a -> a.declare(SetUp.blank(a.key(), base(disk)).structure()),
                 this::begin);
-        toolbar = new Toolbar(desk, files, theme, new Toolbar.Actions(newPane::open, finder::open));
+        toolbar = new Toolbar(desk, files, theme, new Toolbar.Actions(newPane::open, finder::open, () -> files.savePicture(pictures::save)));
         BorderPane frame = new BorderPane(columns);
         frame.setTop(new VBox(toolbar, new HeadlineView(desk, this::openRow), new NoticeStrip(notices)));
         getChildren().addAll(frame, newPane, finder);
@@ -92,7 +92,8 @@ public final class BenchWindow extends StackPane {
         }
     }
 
-    private void openRow(String key) {
+    /** Opens the row of a reading or check. */
+    public void openRow(String key) {
         columns.reveal(ledger);
         ledger.open(key);
     }

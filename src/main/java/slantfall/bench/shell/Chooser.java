@@ -11,4 +11,9 @@ public interface Chooser {
 
     /** Where to save; empty if the user thought better of it. */
     Optional<Path> save(String suggestedName);
+
+    /** Where to save a picture, as SVG or PNG by the name's ending; empty if the user thought better of it. */
+    default Optional<Path> picture(String suggestedName) {
+        return save(suggestedName);
+    }
 }

@@ -4,6 +4,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import slantfall.bench.model.Desk;
 import slantfall.bench.shell.Notices.Answer;
 import slantfall.catalogue.Catalogue;
@@ -170,9 +171,21 @@ public final class FileLife {
 
     /** Asks where and saves; true if it is on disk now. */
     public boolean saveAs() {
+        return chooser.save(suggestedName() + ProjectFile.ENDING).map(this::write).orElse(false);
+    }
+
+    /** Saves a picture of the set-up where the user wants it. */
+    public void savePicture(Consumer<Path> save) {
+        try {
+            chooser.picture(suggestedName() + ".svg").ifPresent(save);
+        } catch (RuntimeException e) {
+            notices.problem(said(e));
+        }
+    }
+
+    private String suggestedName() {
         String name = session.current().title().isBlank() ? session.arrangement().key() : session.current().title();
-        String plain = name.strip().replaceAll("[^\\p{L}\\p{N}._ -]", "").replace(' ', '-');
-        return chooser.save(plain + ProjectFile.ENDING).map(this::write).orElse(false);
+        return name.strip().replaceAll("[^\\p{L}\\p{N}._ -]", "").replace(' ', '-');
     }
 
     private boolean write(Path file) {

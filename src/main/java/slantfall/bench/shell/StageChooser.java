@@ -29,6 +29,15 @@ public final class StageChooser implements Chooser {
         return path(chooser.showSaveDialog(stage));
     }
 
+    @Override
+    public Optional<Path> picture(String suggestedName) {
+        FileChooser chooser = chooser("Save the picture");
+        chooser.getExtensionFilters().setAll(
+                new FileChooser.ExtensionFilter("Drawing, SVG", "*.svg"), new FileChooser.ExtensionFilter("Picture, PNG", "*.png"));
+        chooser.setInitialFileName(suggestedName);
+        return path(chooser.showSaveDialog(stage));
+    }
+
     private FileChooser chooser(String title) {
         FileChooser chooser = new FileChooser();
         chooser.setTitle(title);

@@ -29,7 +29,7 @@ final class Toolbar extends HBox {
     private final Actions actions;
 
     /** What the window does on a key or a button. */
-    record Actions(Runnable create, Runnable find) {}
+    record Actions(Runnable create, Runnable find, Runnable savePicture) {}
 
     Toolbar(Desk desk, FileLife files, Theme theme, Actions actions) {
         super(8);
@@ -102,6 +102,7 @@ final class Toolbar extends HBox {
         items.add(new SeparatorMenuItem());
         items.add(item("Save", "Ctrl+S", files::save));
         items.add(item("Save as …", "Ctrl+Shift+S", files::saveAs));
+        items.add(item("Save picture …", "", actions.savePicture()));
         return items;
     }
 
