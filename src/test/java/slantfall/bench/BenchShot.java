@@ -23,7 +23,10 @@ import slantfall.bench.shell.StoreDesk;
 import slantfall.session.DirectScheduler;
 import slantfall.session.Session;
 
-/** Writes pictures of the window in its sizes and looks, to be looked at by a person. Argument: a folder. */
+/**
+ * Writes pictures of the window in its sizes and looks, to be looked at by a person. Arguments: a folder, and
+ * {@code guide} for those of the user guide alone: the film in light, the slot in dark looks.
+ */
 public final class BenchShot {
 
     private static final int[][] SIZES = {{1440, 900}, {1100, 720}, {960, 600}};
@@ -47,9 +50,14 @@ public final class BenchShot {
         Path folder = Files.createDirectories(Path.of(args[0]));
         FileDesk disk = new StoreDesk(folder);
         Platform.startup(() -> Platform.setImplicitExit(false));
+        boolean guide = args.length > 1 && args[1].equals("guide");
         for (String example : disk.examples().subList(0, 2)) {
             for (boolean dark : new boolean[] {false, true}) {
                 for (int[] size : SIZES) {
+                    boolean film = example.equals(disk.examples().get(0));
+                    if (guide && dark == film) {
+                        continue;
+                    }
                     onScreen(() -> shot(folder, disk, example, dark, size));
                 }
             }

@@ -77,6 +77,30 @@ class BenchTaskTest {
         assertThat(headline).contains("1 of your 1 rule crossed").contains("film thickness");
     }
 
+    /** From a blank start to a verdict on the user's own numbers: the shortcut, the picture, four numbers. */
+    @Test
+    void aBlankStartReachesAVerdictInUnderTenInputs(FxRobot robot) throws Exception {
+        int inputs = 0;
+        robot.press(javafx.scene.input.KeyCode.CONTROL, javafx.scene.input.KeyCode.N)
+                .release(javafx.scene.input.KeyCode.N, javafx.scene.input.KeyCode.CONTROL);
+        inputs++;
+        BenchFixture.settle();
+        robot.clickOn("#new-inclined-film");
+        inputs++;
+        BenchFixture.settle();
+        for (String[] entry : new String[][] {
+            {"liquid.temperature", "15 degC"}, {"angle", "1:20"}, {"feed", "0,3 kg/(m s)"}, {"length", "2 m"}
+        }) {
+            bench.type(robot, entry[0], entry[1]);
+            inputs++;
+        }
+        assertThat(inputs).isLessThan(10);
+        assertThat(bench.desk.setUp().values().keySet())
+                .contains("liquid.temperature", "angle", "feed", "length");
+        assertThat(check("onset.benjamin-1957-yih-1963").verdict()).isEqualTo(Verdict.CROSSED);
+        assertThat(bench.node("headline-sentence", Label.class).getText()).contains("Waves grow");
+    }
+
     private CheckResult check(String key) {
         return bench.desk.assessment().check(key).orElseThrow();
     }

@@ -196,6 +196,7 @@ final class FieldView extends VBox {
         model.unitProperty().addListener((o, a, u) -> showUnit(u));
         showUnit(model.unitProperty().get());
         unit.getStyleClass().add("unit-button");
+        unit.setGraphic(Parts.label("▾", Mark.MUTED));
         unit.setVisible(model.setting().kind().units().size() > 1);
         unit.setOnAction(e -> openUnits());
     }
