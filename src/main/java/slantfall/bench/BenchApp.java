@@ -52,6 +52,7 @@ public final class BenchApp extends Application {
         stage.setScene(window.scene(WIDTH, HEIGHT, theme));
         fit(stage);
         openFirst();
+        stage.setOnShown(e -> Platform.runLater(() -> settle(stage)));
         stage.show();
         StartClock.maybe();
     }
@@ -66,8 +67,23 @@ public final class BenchApp extends Application {
         Rectangle2D room = Screen.getPrimary().getVisualBounds();
         stage.setWidth(Math.min(WIDTH, room.getWidth()));
         stage.setHeight(Math.min(HEIGHT, room.getHeight()));
+    }
+
+    /**
+     * Says the size once more when the window stands: some window managers open it at its smallest and tell nobody, and a
+     * size that does not change is not sent.
+     */
+    private static void settle(Stage stage) {
+        double width = stage.getWidth();
+        double height = stage.getHeight();
         stage.setMinWidth(SMALLEST_WIDTH);
         stage.setMinHeight(SMALLEST_HEIGHT);
+        stage.setWidth(width - 1);
+        stage.setHeight(height - 1);
+        Platform.runLater(() -> {
+            stage.setWidth(width);
+            stage.setHeight(height);
+        });
     }
 
     private void openFirst() {
