@@ -46,7 +46,7 @@ final class SlotProfiles {
         double[] pressure = new double[POINTS];
         double[] gap = new double[POINTS];
         for (int i = 0; i < POINTS; i++) {
-            x[i] = shape.length() * i / (POINTS - 1);
+            x[i] = place(shape, (double) i / (POINTS - 1));
             gap[i] = shape.gap(x[i]);
             pressure[i] = p.inletPressure()
                     + TaperedSlot.pressure(p.flowPerWidth(), p.viscosity(), shape, p.drive(), x[i]);
@@ -57,5 +57,15 @@ final class SlotProfiles {
                 List.of(
                         new Column("pressure", "Pressure", Kind.PRESSURE_ABSOLUTE, pressure),
                         new Column("gap", "Gap", Kind.LENGTH, gap)));
+    }
+
+    /** Places with equal ratios of gap from one to the next, so that the steep pressure at a narrow end is drawn smooth. */
+    private static double place(TaperedSlot.Shape shape, double part) {
+        double b1 = shape.inlet();
+        double b2 = shape.outlet();
+        if (part == 0 || part == 1 || b1 == b2) {
+            return part * shape.length();
+        }
+        return shape.length() * b1 * (Math.pow(b2 / b1, part) - 1) / (b2 - b1);
     }
 }

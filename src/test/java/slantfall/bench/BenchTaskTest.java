@@ -167,6 +167,22 @@ class BenchTaskTest {
     }
 
     @Test
+    void theDrawerAnswersAQuestionAndCloses(FxRobot robot) throws Exception {
+        robot.clickOn("#ask-courses");
+        BenchFixture.settle();
+        assertThat(bench.node("courses", slantfall.bench.plot.CoursePicture.class).getHeight()).isGreaterThan(100);
+        BenchFixture.onScreen(() -> {
+            bench.desk.open(MemoryDisk.slot(), null, null);
+            return null;
+        });
+        BenchFixture.settle();
+        assertThat(bench.node("courses", slantfall.bench.plot.CoursePicture.class).getScene()).isNotNull();
+        robot.clickOn("#ask-courses");
+        BenchFixture.settle();
+        assertThat(bench.has("courses")).isFalse();
+    }
+
+    @Test
     void aPanelOpensIntoItsLadder() throws Exception {
         BenchFixture.onScreen(() -> {
             bench.window.openRow("regime.brauer-1956-turbulent");

@@ -22,6 +22,8 @@ import slantfall.bench.ledger.LedgerView;
 import slantfall.bench.look.Theme;
 import slantfall.bench.model.Desk;
 import slantfall.bench.plot.Pictures;
+import slantfall.bench.question.AlongTheWay;
+import slantfall.bench.question.Drawer;
 import slantfall.declare.LiquidBase;
 import slantfall.declare.SetUp;
 import slantfall.session.Scheduler;
@@ -59,6 +61,7 @@ public final class BenchWindow extends StackPane {
                 this::begin);
         toolbar = new Toolbar(desk, files, theme, new Toolbar.Actions(newPane::open, finder::open, () -> files.savePicture(pictures::save)));
         BorderPane frame = new BorderPane(columns);
+        frame.setBottom(new Drawer(desk, List.of(new AlongTheWay(desk, theme))));
         frame.setTop(new VBox(toolbar, new HeadlineView(desk, this::openRow), new NoticeStrip(notices)));
         getChildren().addAll(frame, newPane, finder);
         StackPane.setAlignment(finder, Pos.TOP_CENTER);
