@@ -1,6 +1,7 @@
 package slantfall.console;
 
 import java.io.PrintWriter;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
 import slantfall.check.Cautions;
@@ -17,8 +18,10 @@ import slantfall.declare.Setting;
 import slantfall.declare.Tolerance;
 import slantfall.declare.Value;
 import slantfall.declare.Working;
+import slantfall.quantity.Display;
 import slantfall.quantity.Kind;
 import slantfall.quantity.Show;
+import slantfall.quantity.Unit;
 import slantfall.quantity.UnitSystem;
 
 /** An assessment as text for people. */
@@ -139,23 +142,31 @@ final class AssessmentText {
             return;
         }
         heading(name + (Double.isNaN(profile.place()) ? "" : ", " + show(profile.place(), Kind.LENGTH) + " from the inlet"));
+        List<Profile.Column> columns = new ArrayList<>(List.of(profile.axis()));
+        columns.addAll(profile.columns());
+        List<Unit> columnUnits = columns.stream().map(this::unit).toList();
         Table table = new Table();
-        String[] head = new String[profile.columns().size() + 1];
-        head[0] = profile.axis().name();
-        for (int j = 0; j < profile.columns().size(); j++) {
-            head[j + 1] = profile.columns().get(j).name();
-        }
-        table.row(head);
+        table.row(columns.stream().map(Profile.Column::name).toArray(String[]::new));
         for (int i = 0; i < profile.axis().values().length; i++) {
-            String[] cells = new String[head.length];
-            cells[0] = show(profile.axis().values()[i], profile.axis().kind());
-            for (int j = 0; j < profile.columns().size(); j++) {
-                Profile.Column column = profile.columns().get(j);
-                cells[j + 1] = show(column.values()[i], column.kind());
+            String[] cells = new String[columns.size()];
+            for (int j = 0; j < cells.length; j++) {
+                double value = columns.get(j).values()[i];
+                cells[j] = Double.isNaN(value)
+                        ? "unknown"
+                        : Show.value(value, columns.get(j).kind(), columnUnits.get(j), DIGITS);
             }
             table.row(cells);
         }
         table.print(out, "  ");
+    }
+
+    /** One unit for a whole column, the one that suits its largest number. */
+    private Unit unit(Profile.Column column) {
+        double largest = 0;
+        for (double v : column.values()) {
+            largest = Double.isNaN(v) ? largest : Math.max(largest, Math.abs(v));
+        }
+        return Display.unit(column.kind(), units, largest);
     }
 
     private void workings(Assessment a) {
