@@ -104,7 +104,7 @@ public final class Liquid {
     public interface Evaluator {
 
         /**
-         * Evaluates the used properties; the others become NaN.
+         * Evaluates the used properties; the others are left as they are, NaN in a fresh state.
          *
          * @param in numbers in the order of {@link Liquid#coordinates} from {@code offset} on [SI]
          * @param out receives the state
@@ -135,13 +135,11 @@ public final class Liquid {
     public List<String> notices(LiquidState state) {
         List<String> notices = new ArrayList<>();
         for (Map.Entry<Property, Provision> entry : provisions.entrySet()) {
-            if (Double.isNaN(state.get(entry.getKey()))) {
-                continue;
-            }
-            if (entry.getValue() instanceof Provision.Correlated) {
+            boolean known = !Double.isNaN(state.get(entry.getKey()));
+            if (known && entry.getValue() instanceof Provision.Correlated) {
                 outside(notices, entry.getKey(), ((Provision.Correlated) entry.getValue()).law(), state);
             }
-            if (entry.getValue() instanceof Provision.Fitted) {
+            if (entry.getValue() instanceof Provision.Fitted && !Double.isNaN(state.temperature)) {
                 beyond(notices, ((Provision.Fitted) entry.getValue()).fit(), state.temperature);
             }
         }
@@ -164,9 +162,15 @@ public final class Liquid {
     }
 
     private static void beyond(List<String> notices, ViscosityFit fit, double temperature) {
+        if (Double.isNaN(fit.at(temperature))) {
+            notices.add(String.format(Locale.ROOT,
+                    "The viscosity at %.1f °C is unknown: the law through the points ends at its T₀ of %.1f °C. Measure a point there.",
+                    temperature - 273.15, fit.t0() - 273.15));
+            return;
+        }
         double factor = fit.bandFactor(temperature);
         String band = Double.isNaN(factor)
-                ? " Two points leave no band."
+                ? " The points leave no band of its error."
                 : String.format(Locale.ROOT, " A new measurement may lie a factor of %.3g off (95 %%).", factor);
         if (fit.extrapolated(temperature)) {
             notices.add(String.format(Locale.ROOT,

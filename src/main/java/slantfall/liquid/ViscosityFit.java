@@ -3,6 +3,8 @@ package slantfall.liquid;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import slantfall.numerics.LeastSquares;
+import slantfall.numerics.LeastSquaresFit;
 import slantfall.numerics.LinearFit;
 import slantfall.numerics.Minimum;
 
@@ -22,6 +24,9 @@ import slantfall.numerics.Minimum;
 public record ViscosityFit(Kind kind, List<Point> points, double t0, LinearFit line) {
 
     private static final double CONFIDENCE = 0.95;
+
+    /** A T₀ nearer to an end of its interval than this was stopped by it [K]. */
+    private static final double T0_END = 1e-3;
 
     public ViscosityFit {
         points = List.copyOf(points);
@@ -121,17 +126,43 @@ public record ViscosityFit(Kind kind, List<Point> points, double t0, LinearFit l
         return n * Math.log(sum / n) + 2 * k + 2.0 * k * (k + 1) / Math.max(n - k - 1, 1e-9);
     }
 
-    /** Viscosity [Pa s] at a temperature [K]. */
+    /** Viscosity [Pa s] at a temperature [K]; NaN at T₀ and below, where the law says nothing. */
     public double at(double temperature) {
-        return Math.exp(line.at(1 / (temperature - t0)));
+        return temperature > t0 ? Math.exp(line.at(1 / (temperature - t0))) : Double.NaN;
     }
 
     /**
-     * Factor by which a new measurement may lie above or below, at 95 %; NaN with two points. For VFT the uncertainty of
-     * T₀ is not in it.
+     * Factor by which a new measurement may lie above or below, at 95 %, with the uncertainty of every coefficient in it.
+     *
+     * @param temperature [K]
+     * @return the factor; NaN with no more points than coefficients, at T₀ and below, and where T₀ ran into an end of its
+     *     interval, so that the points do not determine it
      */
     public double bandFactor(double temperature) {
-        return Math.exp(line.band(1 / (temperature - t0), CONFIDENCE));
+        if (!(temperature > t0)) {
+            return Double.NaN;
+        }
+        if (kind == Kind.ANDRADE) {
+            return Math.exp(line.band(1 / temperature, CONFIDENCE));
+        }
+        double highest = points.get(0).temperature() - 10;
+        if (t0 < T0_END || t0 > highest - T0_END) {
+            return Double.NaN;
+        }
+        return Math.exp(atOptimum().prediction(gradient(temperature), CONFIDENCE));
+    }
+
+    /** The VFT law made linear at its optimum: its columns are the gradients, what is left to fit are the residuals. */
+    private LeastSquaresFit atOptimum() {
+        double[][] rows = points.stream().map(p -> gradient(p.temperature())).toArray(double[][]::new);
+        double[] residuals = points.stream().mapToDouble(p -> Math.log(p.viscosity() / at(p.temperature()))).toArray();
+        return LeastSquares.linear(rows, residuals);
+    }
+
+    /** Slope of ln μ in A, B and T₀. */
+    private double[] gradient(double temperature) {
+        double x = 1 / (temperature - t0);
+        return new double[] {1, x, line.slope() * x * x};
     }
 
     /** Temperatures that were measured [K]. */
