@@ -64,12 +64,17 @@ final class LiquidEvaluator implements Liquid.Evaluator {
 
     private void apply(double temperature, double strength) {
         for (int i = 0; i < laws.length; i++) {
-            results[i] = laws[i].at(temperature, strength);
+            results[i] = possible(laws[i].at(temperature, strength));
         }
         if (fit != null) {
             fitted = fit.at(temperature);
         }
         lastTemperature = temperature;
         lastStrength = strength;
+    }
+
+    /** A law far outside its range may give what no liquid has; that is unknown. */
+    private static double possible(double value) {
+        return value >= 0 && value < Double.POSITIVE_INFINITY ? value : Double.NaN;
     }
 }
