@@ -59,11 +59,11 @@ public final class BenchWindow extends StackPane {
                 a -> pictures.card(a.assess(SetUp.blank(a.key(), base(disk)))),
                 a -> a.declare(SetUp.blank(a.key(), base(disk)).structure()),
                 this::begin);
-        toolbar = new Toolbar(desk, files, theme, new Toolbar.Actions(newPane::open, finder::open, () -> files.savePicture(pictures::save)));
+        toolbar = new Toolbar(desk, files, theme, new Toolbar.Actions(this::create, this::find, () -> files.savePicture(pictures::save)));
         BorderPane frame = new BorderPane(columns);
         frame.setBottom(new Drawer(desk, List.of(new AlongTheWay(desk, theme))));
         frame.setTop(new VBox(toolbar, new HeadlineView(desk, this::openRow), new NoticeStrip(notices)));
-        getChildren().addAll(frame, newPane, finder);
+        getChildren().add(frame);
         StackPane.setAlignment(finder, Pos.TOP_CENTER);
         StackPane.setMargin(finder, new Insets(56, 0, 0, 0));
         addEventFilter(KeyEvent.KEY_PRESSED, this::key);
@@ -92,6 +92,23 @@ public final class BenchWindow extends StackPane {
         if (desk.setUp().values().isEmpty() && desk.setUp().arrangement().equals(arrangement)) {
             railModel.startingProperty().set(true);
             rail.focusFirst();
+        }
+    }
+
+    private void create() {
+        attach(newPane);
+        newPane.open();
+    }
+
+    private void find() {
+        attach(finder);
+        finder.open();
+    }
+
+    /** What covers the window joins it when it is first wanted, so that the start need not dress it. */
+    private void attach(Node cover) {
+        if (!getChildren().contains(cover)) {
+            getChildren().add(cover);
         }
     }
 
@@ -139,14 +156,14 @@ public final class BenchWindow extends StackPane {
 
     private List<Shortcut> shortcuts() {
         return List.of(
-                Shortcut.of(KeyCode.N, newPane::open),
+                Shortcut.of(KeyCode.N, this::create),
                 Shortcut.of(KeyCode.O, files::open),
                 Shortcut.of(KeyCode.S, this::save),
                 Shortcut.shifted(KeyCode.S, files::saveAs),
                 Shortcut.of(KeyCode.Z, desk.session()::undo),
                 Shortcut.shifted(KeyCode.Z, desk.session()::redo),
                 Shortcut.of(KeyCode.Y, desk.session()::redo),
-                Shortcut.of(KeyCode.F, finder::open));
+                Shortcut.of(KeyCode.F, this::find));
     }
 
     /** What is being typed counts before it is saved. */
