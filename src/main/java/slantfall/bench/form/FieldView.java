@@ -28,8 +28,8 @@ import slantfall.quantity.Unit;
 /** One number: name and standing, slider, field, unit, and below them what was understood or what is wrong. */
 final class FieldView extends VBox {
 
-    private static final double FIELD = 92;
-    private static final double UNIT = 82;
+    private static final double FIELD = 122;
+    private static final double UNIT = 78;
 
     private final FieldModel model;
     private final Slider slider = new Slider(0, 1, 0);
